@@ -1,0 +1,2 @@
+/** Reading the audit trail and checking its chain. */
+package org.evenbeam.logbook.history;

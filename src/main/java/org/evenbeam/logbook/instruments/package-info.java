@@ -1,0 +1,2 @@
+/** Instruments, their status and the log of what happened to them. */
+package org.evenbeam.logbook.instruments;

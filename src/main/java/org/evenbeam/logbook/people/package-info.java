@@ -1,0 +1,2 @@
+/** People, their passwords and signing in. */
+package org.evenbeam.logbook.people;

@@ -1,0 +1,2 @@
+/** Verification plans and their numbered revisions. */
+package org.evenbeam.logbook.plans;
