@@ -12,7 +12,7 @@ public final class NumberRefused extends IllegalArgumentException {
     OTHER_DECIMAL_SIGN,
     /** Not a plain decimal number. */
     NOT_A_NUMBER,
-    /** Its magnitude is outside 1e-300 to 1e300, or it has more than 100 characters. */
+    /** Its magnitude is outside 1e-150 to 1e150, or it has more than 100 characters. */
     OUT_OF_RANGE
   }
 

@@ -12,7 +12,7 @@ import java.util.regex.Pattern;
  */
 public record TypedDecimal(String text, DecimalSign sign, BigDecimal value) {
   private static final int LONGEST = 100;
-  private static final int LARGEST_EXPONENT = 300;
+  private static final int LARGEST_EXPONENT = 150;
   private static final Pattern PLAIN =
       Pattern.compile("[+-]?(?:\\d+(?:\\.\\d*)?|\\.\\d+)(?:[eE][+-]?\\d{1,4})?");
 
@@ -43,7 +43,7 @@ public record TypedDecimal(String text, DecimalSign sign, BigDecimal value) {
   private static BigDecimal withinRange(BigDecimal value, String text) {
     int exponent = value.precision() - value.scale() - 1;
     boolean readable =
-        Math.abs(exponent) <= LARGEST_EXPONENT && value.scale() <= 2 * LARGEST_EXPONENT;
+        Math.abs(exponent) <= LARGEST_EXPONENT && value.scale() <= LARGEST_EXPONENT;
     if (value.signum() == 0 ? Math.abs(value.scale()) > LARGEST_EXPONENT : !readable) {
       throw new NumberRefused(NumberRefused.Reason.OUT_OF_RANGE, text);
     }

@@ -9,7 +9,7 @@ import java.math.BigDecimal;
  * @param stated the stated half-width or standard uncertainty, in the unit of the value, not
  *     negative
  * @param spread how it is spread
- * @param degreesOfFreedom greater than zero, infinite where nothing is known against it
+ * @param degreesOfFreedom 0.5 or more, infinite where nothing is known against it
  */
 public record UncertaintyTerm(
     String name, BigDecimal stated, Spread spread, double degreesOfFreedom) {
@@ -18,9 +18,9 @@ public record UncertaintyTerm(
     if (stated.signum() < 0) {
       throw new IllegalArgumentException("stated is " + stated + ", allowed: 0 or more");
     }
-    if (!(degreesOfFreedom > 0)) {
+    if (!(degreesOfFreedom >= 0.5)) {
       throw new IllegalArgumentException(
-          "degreesOfFreedom is " + degreesOfFreedom + ", allowed: greater than 0");
+          "degreesOfFreedom is " + degreesOfFreedom + ", allowed: 0.5 or more");
     }
   }
 

@@ -10,7 +10,7 @@ import java.util.Optional;
  * @param biasBelow how far the bias may lie below zero, greater than 0
  * @param biasAbove how far the bias may lie above zero, greater than 0
  * @param maximumStandardDeviation the permitted standard deviation, greater than 0
- * @param alpha the risk accepted in each one-sided test, greater than 0 and at most 0.5
+ * @param alpha the risk accepted in each one-sided test, 1e-12 to 0.5
  * @param biasRule how the bias is decided
  * @param precisionRule how the precision is decided
  * @param referenceUncertaintyCounts false when the plan leaves the reference's uncertainty out of
@@ -29,9 +29,9 @@ public record Criteria(
     positive("biasBelow", biasBelow);
     positive("biasAbove", biasAbove);
     positive("maximumStandardDeviation", maximumStandardDeviation);
-    if (!(alpha > 0 && alpha <= 0.5)) {
+    if (!(alpha >= 1e-12 && alpha <= 0.5)) {
       throw new IllegalArgumentException(
-          "alpha is " + alpha + ", allowed: greater than 0, at most 0.5");
+          "alpha is " + alpha + ", allowed: 1e-12 to 0.5");
     }
   }
 

@@ -7,7 +7,7 @@ import java.math.BigDecimal;
  *
  * @param value the reference value, in the unit of the readings
  * @param standardUncertainty from its budget, in the same unit, 0 or more
- * @param degreesOfFreedom of that uncertainty, greater than 0, infinite when a certificate gives
+ * @param degreesOfFreedom of that uncertainty, 0.5 or more, infinite when a certificate gives
  *     only U and k
  * @param uncertaintyStated false when none was given and the value is taken as exact
  */
@@ -22,9 +22,9 @@ public record Reference(
       throw new IllegalArgumentException(
           "standardUncertainty is " + standardUncertainty + ", allowed: 0 or more, finite");
     }
-    if (!(degreesOfFreedom > 0)) {
+    if (!(degreesOfFreedom >= 0.5)) {
       throw new IllegalArgumentException(
-          "degreesOfFreedom is " + degreesOfFreedom + ", allowed: greater than 0");
+          "degreesOfFreedom is " + degreesOfFreedom + ", allowed: 0.5 or more");
     }
   }
 

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.evenbeam.metrology.TypedDecimal;
+import org.evenbeam.verification.Condition;
 
 /**
  * The room as it was during a run, each value as typed.

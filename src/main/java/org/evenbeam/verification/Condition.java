@@ -1,4 +1,4 @@
-package org.evenbeam.verification.plan;
+package org.evenbeam.verification;
 
 /** A condition of the room that a run records. */
 public enum Condition {
