@@ -16,9 +16,10 @@ import java.math.BigDecimal;
 import org.evenbeam.trail.CanonicalForm;
 
 /**
- * Records as JSON that is kept for years: decimals as texts with their trailing zeros, times and dates by
- * ISO 8601, members in canonical order (RFC 8785). Only a record's own components are written, so a method
- * added to a record changes nothing; a test holds the form against files written by earlier releases.
+ * Records as JSON that is kept for years: decimals as texts with their trailing zeros, times and
+ * dates by ISO 8601, members in canonical order (RFC 8785). Only a record's own components are
+ * written, so a method added to a record changes nothing; a test holds the form against files
+ * written by earlier releases.
  */
 public final class LastingJson {
   private static final ObjectMapper MAPPER =

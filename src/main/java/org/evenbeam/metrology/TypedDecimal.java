@@ -42,8 +42,7 @@ public record TypedDecimal(String text, DecimalSign sign, BigDecimal value) {
 
   private static BigDecimal withinRange(BigDecimal value, String text) {
     int exponent = value.precision() - value.scale() - 1;
-    boolean readable =
-        Math.abs(exponent) <= LARGEST_EXPONENT && value.scale() <= LARGEST_EXPONENT;
+    boolean readable = Math.abs(exponent) <= LARGEST_EXPONENT && value.scale() <= LARGEST_EXPONENT;
     if (value.signum() == 0 ? Math.abs(value.scale()) > LARGEST_EXPONENT : !readable) {
       throw new NumberRefused(NumberRefused.Reason.OUT_OF_RANGE, text);
     }

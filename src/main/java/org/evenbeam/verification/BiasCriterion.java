@@ -13,16 +13,17 @@ import org.evenbeam.stats.LimitTest;
 import org.evenbeam.stats.UncertaintyComponent;
 
 /**
- * Bias against its limit: u_b² = u_rep² + u_r², u_rep the larger of s/√n with n − 1 degrees of freedom and
- * d/√12 with infinitely many (JCGM 100:2008, F.2.2.1), effective degrees of freedom by Welch–Satterthwaite
- * (JCGM 100:2008, G.4), two one-sided t tests.
+ * Bias against its limit: u_b² = u_rep² + u_r², u_rep the larger of s/√n with n − 1 degrees of
+ * freedom and d/√12 with infinitely many (JCGM 100:2008, F.2.2.1), effective degrees of freedom by
+ * Welch–Satterthwaite (JCGM 100:2008, G.4), two one-sided t tests.
  */
 final class BiasCriterion {
   private static final double TRADES_THIRD = 3;
 
   private BiasCriterion() {}
 
-  static BiasFinding judge(CheckPointQuestion question, ExactSample sample, Collection<Note> notes) {
+  static BiasFinding judge(
+      CheckPointQuestion question, ExactSample sample, Collection<Note> notes) {
     Optional<UncertaintyComponent> repeatability = repeatability(question, sample, notes);
     if (repeatability.isEmpty()) {
       return new BiasFinding(

@@ -9,8 +9,8 @@ import org.evenbeam.stats.Shown;
 /**
  * The outcome of the bias criterion.
  *
- * @param uncertainty the standard uncertainty of the bias with its effective degrees of freedom; empty where
- *     the readings give none
+ * @param uncertainty the standard uncertainty of the bias with its effective degrees of freedom;
+ *     empty where the readings give none
  * @param interval of the bias at level 1 − 2α
  * @param test against the limits; empty where not asked or without an uncertainty
  * @param outcome what was decided; empty where not asked or where something is missing

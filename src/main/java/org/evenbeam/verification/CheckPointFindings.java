@@ -13,11 +13,12 @@ import org.evenbeam.stats.StudentTTest;
  * @param mean of the readings
  * @param standardDeviation s, with n − 1; empty for one reading
  * @param bias mean less reference value, rounded once
- * @param tTest the classical one-sample t test, as information; empty for one reading and for equal readings
+ * @param tTest the classical one-sample t test, as information; empty for one reading and for equal
+ *     readings
  * @param biasFinding the bias criterion
  * @param precisionFinding the precision criterion
- * @param verdict the worst outcome; empty where nothing was asked, something is missing or readings are still
- *     to come
+ * @param verdict the worst outcome; empty where nothing was asked, something is missing or readings
+ *     are still to come
  * @param notes what a reader must know beside the figures
  */
 public record CheckPointFindings(

@@ -30,8 +30,7 @@ public record Criteria(
     positive("biasAbove", biasAbove);
     positive("maximumStandardDeviation", maximumStandardDeviation);
     if (!(alpha >= 1e-12 && alpha <= 0.5)) {
-      throw new IllegalArgumentException(
-          "alpha is " + alpha + ", allowed: 1e-12 to 0.5");
+      throw new IllegalArgumentException("alpha is " + alpha + ", allowed: 1e-12 to 0.5");
     }
   }
 

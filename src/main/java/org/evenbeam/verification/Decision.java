@@ -21,8 +21,7 @@ final class Decision {
             case BEYOND -> Verdict.DOES_NOT_CONFORM;
             case NEITHER -> Verdict.UNDECIDED;
           };
-      case GUARDED_REJECTION ->
-          shown == Shown.BEYOND ? Verdict.DOES_NOT_CONFORM : Verdict.CONFORMS;
+      case GUARDED_REJECTION -> shown == Shown.BEYOND ? Verdict.DOES_NOT_CONFORM : Verdict.CONFORMS;
       case SIMPLE_ACCEPTANCE -> estimateWithin ? Verdict.CONFORMS : Verdict.DOES_NOT_CONFORM;
     };
   }

@@ -2,8 +2,9 @@ package org.evenbeam.verification;
 
 import java.time.LocalDate;
 
-
-/** Something that a reader of a finding must know beside its figures; a sentence in {@code wording}. */
+/**
+ * Something that a reader of a finding must know beside its figures; a sentence in {@code wording}.
+ */
 public sealed interface Note {
 
   /** The reference came without an uncertainty and was taken as exact. */

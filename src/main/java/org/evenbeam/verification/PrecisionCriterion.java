@@ -11,8 +11,8 @@ import org.evenbeam.stats.StandardDeviationBounds;
 import org.evenbeam.stats.VarianceTest;
 
 /**
- * Within-run repeatability against its limit: chi-square with n − 1 degrees of freedom, and for equal
- * readings the bound that the resolution allows, which is also the floor of the upper bound.
+ * Within-run repeatability against its limit: chi-square with n − 1 degrees of freedom, and for
+ * equal readings the bound that the resolution allows, which is also the floor of the upper bound.
  */
 final class PrecisionCriterion {
   private static final PrecisionFinding NOTHING =
@@ -85,8 +85,7 @@ final class PrecisionCriterion {
   private static Verdict outcome(
       CheckPointQuestion question, int n, VarianceTest test, Collection<Note> notes) {
     boolean within = test.bounds().standardDeviation() <= test.limit();
-    Verdict verdict =
-        Decision.by(question.criteria().precisionRule(), test.shown(), within);
+    Verdict verdict = Decision.by(question.criteria().precisionRule(), test.shown(), within);
     if (!within && verdict == Verdict.CONFORMS) {
       notes.add(new Note.EstimateBeyondButNotShown(Criterion.PRECISION, n));
     }

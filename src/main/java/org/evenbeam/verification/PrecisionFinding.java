@@ -9,8 +9,8 @@ import org.evenbeam.stats.VarianceTest;
 /**
  * The outcome of the precision criterion.
  *
- * @param bounds what chi-square says about the true standard deviation; empty for one reading and for equal
- *     readings
+ * @param bounds what chi-square says about the true standard deviation; empty for one reading and
+ *     for equal readings
  * @param test against the limit; empty where not asked or without bounds
  * @param lowerBound one-sided lower bound of the true standard deviation
  * @param upperBound one-sided upper bound of it, never below what the resolution allows

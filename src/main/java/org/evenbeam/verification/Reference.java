@@ -7,8 +7,8 @@ import java.math.BigDecimal;
  *
  * @param value the reference value, in the unit of the readings
  * @param standardUncertainty from its budget, in the same unit, 0 or more
- * @param degreesOfFreedom of that uncertainty, 0.5 or more, infinite when a certificate gives
- *     only U and k
+ * @param degreesOfFreedom of that uncertainty, 0.5 or more, infinite when a certificate gives only
+ *     U and k
  * @param uncertaintyStated false when none was given and the value is taken as exact
  */
 public record Reference(

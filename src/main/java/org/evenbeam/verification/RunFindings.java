@@ -8,8 +8,8 @@ import java.util.Optional;
  * Everything found in one run.
  *
  * @param checkPoints one for each check point that has readings, in the plan's order
- * @param verdict the worst check point decides; empty where any has none or where the run itself lacks
- *     something
+ * @param verdict the worst check point decides; empty where any has none or where the run itself
+ *     lacks something
  * @param notes what keeps the run from a verdict, or must be known beside it
  */
 public record RunFindings(
@@ -33,8 +33,6 @@ public record RunFindings(
     checkPoints.forEach(checkPoint -> checkPoint.verdict().ifPresent(verdicts::add));
     boolean complete = verdicts.size() == planned && obstacles.isEmpty();
     return new RunFindings(
-        checkPoints,
-        complete ? Optional.of(Verdict.worst(verdicts)) : Optional.empty(),
-        obstacles);
+        checkPoints, complete ? Optional.of(Verdict.worst(verdicts)) : Optional.empty(), obstacles);
   }
 }

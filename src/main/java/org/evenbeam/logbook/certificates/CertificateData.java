@@ -9,7 +9,8 @@ import org.evenbeam.logbook.run.RunSheet;
 import org.evenbeam.logbook.run.Signature;
 
 /**
- * Everything that a certificate says, kept as JSON in its record; the document is made from this alone.
+ * Everything that a certificate says, kept as JSON in its record; the document is made from this
+ * alone.
  *
  * @param laboratory the laboratory as it was when the certificate was issued
  * @param sheet the run with its readings, standards, plan and conditions
@@ -37,6 +38,5 @@ public record CertificateData(
    * @param at when
    * @param contentSha256 SHA-256 of the content signed
    */
-  public record Signed(
-      String name, Signature.Meaning meaning, Instant at, String contentSha256) {}
+  public record Signed(String name, Signature.Meaning meaning, Instant at, String contentSha256) {}
 }

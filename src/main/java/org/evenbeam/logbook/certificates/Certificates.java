@@ -88,9 +88,7 @@ public final class Certificates {
   /** All certificates, newest first, at most {@code most}. */
   public List<CertificateFacts> history(Session session, int most) {
     return desk.read(
-        session,
-        UseCase.READ_CERTIFICATES,
-        transaction -> certificates.newest(transaction, most));
+        session, UseCase.READ_CERTIFICATES, transaction -> certificates.newest(transaction, most));
   }
 
   /**
@@ -132,8 +130,7 @@ public final class Certificates {
 
   private CertificateRecord record(Transaction transaction, Session session, long run) {
     List<RunEvent> events = sources.runs().events(transaction, run);
-    RunEvent last =
-        events.stream().max(Comparator.comparingInt(RunEvent::sequence)).orElseThrow();
+    RunEvent last = events.stream().max(Comparator.comparingInt(RunEvent::sequence)).orElseThrow();
     if (last.step() != RunStep.APPROVED) {
       throw CertificateRefused.notApproved(run, last.step().state());
     }

@@ -113,8 +113,7 @@ public final class Instruments {
         useCase,
         Optional.of(text),
         transaction ->
-            addEvent(
-                transaction, session, known(transaction, tag).tag(), kind, text, status));
+            addEvent(transaction, session, known(transaction, tag).tag(), kind, text, status));
   }
 
   private long addEvent(

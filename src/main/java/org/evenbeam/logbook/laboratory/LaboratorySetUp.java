@@ -16,7 +16,9 @@ import org.evenbeam.logbook.people.PasswordHash;
 import org.evenbeam.logbook.people.People;
 import org.evenbeam.logbook.people.PersonRecords;
 
-/** The laboratory's own facts, and the first set-up, before which there is nobody who could sign in. */
+/**
+ * The laboratory's own facts, and the first set-up, before which there is nobody who could sign in.
+ */
 public final class LaboratorySetUp {
   private final Transactions transactions;
   private final Desk desk;
@@ -61,8 +63,7 @@ public final class LaboratorySetUp {
   public Person setUp(
       Laboratory laboratory, String signInName, String name, char[] password, Instant at) {
     PasswordHash hash = people.hashOfNew(password);
-    Change change =
-        new Change(at, Optional.empty(), UseCase.SET_UP_LABORATORY, Optional.empty());
+    Change change = new Change(at, Optional.empty(), UseCase.SET_UP_LABORATORY, Optional.empty());
     return transactions.change(
         change,
         transaction -> {

@@ -11,8 +11,8 @@ import org.bouncycastle.crypto.generators.Argon2BytesGenerator;
 import org.bouncycastle.crypto.params.Argon2Parameters;
 
 /**
- * Argon2id (RFC 9106) by a library, with a salt of 16 bytes. The cost is written into each hash, so that it
- * can rise later without locking anyone out.
+ * Argon2id (RFC 9106) by a library, with a salt of 16 bytes. The cost is written into each hash, so
+ * that it can rise later without locking anyone out.
  */
 public final class Passwords {
   /**
@@ -22,7 +22,9 @@ public final class Passwords {
    * @param passes over that memory
    */
   public record Cost(int memoryKibibytes, int passes) {
-    /** 19 MiB and two passes: the least that the OWASP password storage guidance asks of Argon2id. */
+    /**
+     * 19 MiB and two passes: the least that the OWASP password storage guidance asks of Argon2id.
+     */
     public static final Cost USUAL = new Cost(19 * 1024, 2);
   }
 
@@ -59,8 +61,7 @@ public final class Passwords {
   public boolean matches(char[] password, PasswordHash kept) {
     String[] parts = kept.encoded().split("\\$", -1);
     String[] parameters = parts[3].split("[=,]", -1);
-    Cost keptCost =
-        new Cost(Integer.parseInt(parameters[1]), Integer.parseInt(parameters[3]));
+    Cost keptCost = new Cost(Integer.parseInt(parameters[1]), Integer.parseInt(parameters[3]));
     byte[] salt = Base64.getDecoder().decode(parts[4]);
     byte[] expected = Base64.getDecoder().decode(parts[5]);
     return MessageDigest.isEqual(expected, argon2id(password, salt, keptCost));

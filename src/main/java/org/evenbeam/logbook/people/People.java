@@ -23,8 +23,7 @@ public final class People {
   private final Passwords passwords;
 
   /** Works on the given store. */
-  public People(
-      Transactions transactions, Desk desk, PersonRecords people, Passwords passwords) {
+  public People(Transactions transactions, Desk desk, PersonRecords people, Passwords passwords) {
     this.transactions = transactions;
     this.desk = desk;
     this.people = people;

@@ -16,8 +16,7 @@ public final class PlanRefused extends LogbookException {
 
   static PlanRefused otherUnit(
       String checkPoint, String standard, String standardUnit, String instrumentUnit) {
-    return new PlanRefused(
-        "plan-other-unit", checkPoint, standard, standardUnit, instrumentUnit);
+    return new PlanRefused("plan-other-unit", checkPoint, standard, standardUnit, instrumentUnit);
   }
 
   static PlanRefused shareOnIntervalScale(String checkPoint, String unit) {

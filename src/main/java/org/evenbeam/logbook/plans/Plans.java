@@ -58,8 +58,7 @@ public final class Plans {
     Instrument instrument =
         instruments
             .find(transaction, revision.instrumentTag())
-            .orElseThrow(
-                () -> new NotFound(NotFound.Thing.INSTRUMENT, revision.instrumentTag()));
+            .orElseThrow(() -> new NotFound(NotFound.Thing.INSTRUMENT, revision.instrumentTag()));
     int last =
         plans.current(transaction, revision.instrumentTag()).stream()
             .filter(plan -> plan.title().equals(revision.title()))
@@ -82,8 +81,7 @@ public final class Plans {
           point.label(), standard.tag(), standard.unit(), instrument.unit());
     }
     boolean shareOfReference =
-        Stream.of(
-                point.biasBelow(), point.biasAbove(), point.maximumStandardDeviation())
+        Stream.of(point.biasBelow(), point.biasAbove(), point.maximumStandardDeviation())
             .flatMap(Optional::stream)
             .anyMatch(limit -> limit.percentOfReference().isPresent());
     if (shareOfReference && !RatioScale.isOne(instrument.unit())) {

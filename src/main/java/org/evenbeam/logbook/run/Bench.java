@@ -31,7 +31,8 @@ public final class Bench {
   /**
    * Enters one reading as typed.
    *
-   * @throws RunRefused when the text is no number, all readings are in, or the run is no draft of this person
+   * @throws RunRefused when the text is no number, all readings are in, or the run is no draft of
+   *     this person
    */
   public Reading enter(Session session, long run, String checkPoint, String typed) {
     return onDraft(
@@ -41,8 +42,7 @@ public final class Bench {
         Optional.empty(),
         draft -> {
           TypedDecimal value = parse(typed, sign(draft.transaction()));
-          runs.keepScratch(
-              draft.transaction(), run, new Scratch(checkPoint, "", session.now()));
+          runs.keepScratch(draft.transaction(), run, new Scratch(checkPoint, "", session.now()));
           return add(draft, session, checkPoint, value, Reading.Source.KEYBOARD);
         });
   }
@@ -50,8 +50,8 @@ public final class Bench {
   /**
    * Enters a pasted column, all of it or nothing. Lines without any text are passed over.
    *
-   * @throws RunRefused naming the first line that is no number, or when there are more lines than readings to
-   *     go
+   * @throws RunRefused naming the first line that is no number, or when there are more lines than
+   *     readings to go
    */
   public List<Reading> enterColumn(
       Session session, long run, String checkPoint, List<String> lines) {
@@ -70,9 +70,7 @@ public final class Bench {
           int next = nextPosition(point);
           for (TypedDecimal value : values) {
             entered.add(
-                keep(
-                    draft,
-                    reading(session, checkPoint, next++, value, Reading.Source.PASTED)));
+                keep(draft, reading(session, checkPoint, next++, value, Reading.Source.PASTED)));
           }
           return entered;
         });
@@ -81,11 +79,10 @@ public final class Bench {
   /**
    * Corrects a reading by a new entry that points at the old one.
    *
-   * @throws RunRefused when the text is no number, the reason is missing, the reading no longer counts, or the
-   *     run is no draft of this person
+   * @throws RunRefused when the text is no number, the reason is missing, the reading no longer
+   *     counts, or the run is no draft of this person
    */
-  public Reading correct(
-      Session session, long run, long readingId, String typed, String reason) {
+  public Reading correct(Session session, long run, long readingId, String typed, String reason) {
     String why = Reasons.required(reason);
     return onDraft(
         session,
@@ -114,8 +111,8 @@ public final class Bench {
   /**
    * Strikes a reading for a cause seen at the bench. It stays visible and no longer counts.
    *
-   * @throws RunRefused when the cause is missing, the reading no longer counts, or the run is no draft of this
-   *     person
+   * @throws RunRefused when the cause is missing, the reading no longer counts, or the run is no
+   *     draft of this person
    */
   public void strike(Session session, long run, long readingId, String cause) {
     String seen = Reasons.required(cause);
@@ -126,8 +123,7 @@ public final class Bench {
         Optional.of(seen),
         draft -> {
           counting(draft.sheet(), readingId);
-          Reading.Strike strike =
-              new Reading.Strike(seen, session.now(), session.person().id());
+          Reading.Strike strike = new Reading.Strike(seen, session.now(), session.person().id());
           runs.addStrike(draft.transaction(), readingId, strike);
           return strike;
         });
@@ -180,11 +176,7 @@ public final class Bench {
   }
 
   private Reading add(
-      Draft draft,
-      Session session,
-      String checkPoint,
-      TypedDecimal value,
-      Reading.Source source) {
+      Draft draft, Session session, String checkPoint, TypedDecimal value, Reading.Source source) {
     SheetCheckPoint point = checkPoint(draft.sheet(), checkPoint);
     if (point.toGo() == 0) {
       throw RunRefused.allReadingsIn(checkPoint, point.planned().readings());
@@ -193,11 +185,7 @@ public final class Bench {
   }
 
   private static Reading reading(
-      Session session,
-      String checkPoint,
-      int position,
-      TypedDecimal value,
-      Reading.Source source) {
+      Session session, String checkPoint, int position, TypedDecimal value, Reading.Source source) {
     return new Reading(
         0,
         checkPoint,

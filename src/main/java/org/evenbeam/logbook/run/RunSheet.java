@@ -61,8 +61,12 @@ public record RunSheet(
   /** What keeps the run from a verdict whatever its readings say. */
   public List<Note> obstacles() {
     List<Note> obstacles = new ArrayList<>();
-    conditions.missing(plan.environment()).forEach(c -> obstacles.add(new Note.ConditionMissing(c)));
-    conditions.outside(plan.environment()).forEach(c -> obstacles.add(new Note.ConditionOutside(c)));
+    conditions
+        .missing(plan.environment())
+        .forEach(c -> obstacles.add(new Note.ConditionMissing(c)));
+    conditions
+        .outside(plan.environment())
+        .forEach(c -> obstacles.add(new Note.ConditionOutside(c)));
     for (SheetCheckPoint point : checkPoints) {
       if (!point.certificate().holdsOn(performed)) {
         obstacles.add(
@@ -74,9 +78,7 @@ public record RunSheet(
 
   /** SHA-256 of the run's content in canonical form: what a signature is bound to. */
   public String contentSha256() {
-    return Sha256.hex(
-        LastingJson.write(this)
-            .getBytes(StandardCharsets.UTF_8));
+    return Sha256.hex(LastingJson.write(this).getBytes(StandardCharsets.UTF_8));
   }
 
   /** How many readings were struck, where the verdict would differ with them in; else 0. */
@@ -87,8 +89,7 @@ public record RunSheet(
       struck += point.standing().size() - point.counting().size();
       point.findingsWithStruck().or(point::findings).ifPresent(withStruck::add);
     }
-    Optional<Verdict> other =
-        RunFindings.of(checkPoints.size(), withStruck, obstacles()).verdict();
+    Optional<Verdict> other = RunFindings.of(checkPoints.size(), withStruck, obstacles()).verdict();
     return other.equals(verdict) ? 0 : struck;
   }
 }

@@ -18,7 +18,10 @@ import org.evenbeam.logbook.standards.StandardRecords;
 import org.evenbeam.verification.plan.PlanRevision;
 import org.evenbeam.verification.plan.PlannedCheckPoint;
 
-/** Starting runs, finding them again and giving them up. What is measured is {@link Bench}'s business. */
+/**
+ * Starting runs, finding them again and giving them up. What is measured is {@link Bench}'s
+ * business.
+ */
 public final class Runs {
   private final Desk desk;
   private final RunRecords runs;
@@ -48,8 +51,8 @@ public final class Runs {
    *
    * @return the run's number
    * @throws NotFound when the instrument or its plan is unknown
-   * @throws RunRefused when a standard's certificate does not hold today, the instrument is retired, or an
-   *     as-left run lacks its as-found run or the adjustment after it
+   * @throws RunRefused when a standard's certificate does not hold today, the instrument is
+   *     retired, or an as-left run lacks its as-found run or the adjustment after it
    */
   public long start(Session session, NewRun wanted) {
     return desk.change(
@@ -74,8 +77,7 @@ public final class Runs {
                       .map(point -> standardInUse(transaction, point, session.today()))
                       .toList());
           long number = runs.add(transaction, run);
-          runs.addEvent(
-              transaction, number, step(session, 1, RunStep.STARTED, Optional.empty()));
+          runs.addEvent(transaction, number, step(session, 1, RunStep.STARTED, Optional.empty()));
           return number;
         });
   }
@@ -101,8 +103,7 @@ public final class Runs {
 
   /** The runs in that state, oldest first. */
   public List<RunSummary> inState(Session session, RunState state) {
-    return desk.read(
-        session, UseCase.READ_RUNS, transaction -> runs.inState(transaction, state));
+    return desk.read(session, UseCase.READ_RUNS, transaction -> runs.inState(transaction, state));
   }
 
   /** An instrument's runs, newest first, at most {@code most}. */
@@ -145,8 +146,7 @@ public final class Runs {
         transaction -> {
           List<RunEvent> events = runs.events(transaction, number);
           Drafts.requireOwn(session, sheets.read(transaction, number), state(events), from);
-          return runs.addEvent(
-              transaction, number, step(session, events.size() + 1, step, why));
+          return runs.addEvent(transaction, number, step(session, events.size() + 1, step, why));
         });
   }
 

@@ -116,8 +116,7 @@ public final class SheetReader {
         standards.certificates(transaction, inUse.standardTag()).stream()
             .filter(c -> c.number().equals(inUse.certificateNumber()))
             .findFirst()
-            .orElseThrow(
-                () -> new NotFound(NotFound.Thing.CERTIFICATE, inUse.certificateNumber()));
+            .orElseThrow(() -> new NotFound(NotFound.Thing.CERTIFICATE, inUse.certificateNumber()));
     CertifiedValue certified = certified(certificate, planned);
     CheckPointQuestion question =
         new CheckPointQuestion(
@@ -133,7 +132,6 @@ public final class SheetReader {
   static CertifiedValue certified(StandardCertificate certificate, PlannedCheckPoint planned) {
     return certificate
         .value(planned.valueLabel())
-        .orElseThrow(
-            () -> new NotFound(NotFound.Thing.CERTIFIED_VALUE, planned.valueLabel()));
+        .orElseThrow(() -> new NotFound(NotFound.Thing.CERTIFIED_VALUE, planned.valueLabel()));
   }
 }

@@ -20,8 +20,8 @@ import org.evenbeam.verification.RunFindings;
 import org.evenbeam.verification.Verdict;
 
 /**
- * Submitting a run: the technician's signature, the findings kept as they are at that moment, and an
- * instrument that does not conform taken out of service at once.
+ * Submitting a run: the technician's signature, the findings kept as they are at that moment, and
+ * an instrument that does not conform taken out of service at once.
  */
 public final class Submissions {
   private final Desk desk;
@@ -50,12 +50,11 @@ public final class Submissions {
    * @param password the technician's, for the signature
    * @param withoutVerdict whether to submit although there is no verdict
    * @return what was found, as kept
-   * @throws RunRefused when there is nothing to submit, there is no verdict and {@code withoutVerdict} is
-   *     false, or the run is no draft of this person
+   * @throws RunRefused when there is nothing to submit, there is no verdict and {@code
+   *     withoutVerdict} is false, or the run is no draft of this person
    * @throws org.evenbeam.logbook.people.PasswordWrong when the password is not the technician's
    */
-  public RunFindings submit(
-      Session session, long number, char[] password, boolean withoutVerdict) {
+  public RunFindings submit(Session session, long number, char[] password, boolean withoutVerdict) {
     people.confirm(session, password);
     return desk.change(
         session,

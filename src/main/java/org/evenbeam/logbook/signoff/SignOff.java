@@ -37,17 +37,15 @@ public final class SignOff {
   /** The runs that wait for a manager, oldest first. */
   public List<RunSummary> queue(Session session) {
     return desk.read(
-        session,
-        UseCase.READ_RUNS,
-        transaction -> runs.inState(transaction, RunState.SUBMITTED));
+        session, UseCase.READ_RUNS, transaction -> runs.inState(transaction, RunState.SUBMITTED));
   }
 
   /**
    * Approves a submitted run.
    *
    * @param reason what the manager decides and why; needed unless the run CONFORMS
-   * @throws SignOffRefused when it is the manager's own run, is not submitted, lacks its reason, or its content
-   *     is no longer what was signed
+   * @throws SignOffRefused when it is the manager's own run, is not submitted, lacks its reason, or
+   *     its content is no longer what was signed
    * @throws org.evenbeam.logbook.people.PasswordWrong when the password is not the manager's
    */
   public void approve(Session session, long run, char[] password, String reason) {
@@ -88,8 +86,7 @@ public final class SignOff {
   }
 
   private static RunEvent submission(long run, List<RunEvent> events) {
-    RunEvent last =
-        events.stream().max(Comparator.comparingInt(RunEvent::sequence)).orElseThrow();
+    RunEvent last = events.stream().max(Comparator.comparingInt(RunEvent::sequence)).orElseThrow();
     if (last.step() != RunStep.SUBMITTED) {
       throw SignOffRefused.notSubmitted(run, last.step().state());
     }

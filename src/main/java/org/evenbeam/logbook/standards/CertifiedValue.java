@@ -16,8 +16,8 @@ import org.evenbeam.verification.Reference;
 public record CertifiedValue(String label, BigDecimal value, UncertaintyBudget budget) {
 
   /**
-   * The value that readings are held against, with its combined standard uncertainty and effective degrees of
-   * freedom (JCGM 100:2008, 5.1.2 and G.4).
+   * The value that readings are held against, with its combined standard uncertainty and effective
+   * degrees of freedom (JCGM 100:2008, 5.1.2 and G.4).
    */
   public Reference reference() {
     if (!budget.isStated()) {
@@ -31,7 +31,6 @@ public record CertifiedValue(String label, BigDecimal value, UncertaintyBudget b
                         new UncertaintyComponent(
                             term.standardUncertainty(), term.degreesOfFreedom()))
                 .toList());
-    return new Reference(
-        value, combined.standardUncertainty(), combined.degreesOfFreedom(), true);
+    return new Reference(value, combined.standardUncertainty(), combined.degreesOfFreedom(), true);
   }
 }

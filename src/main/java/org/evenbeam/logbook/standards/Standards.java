@@ -62,8 +62,6 @@ public final class Standards {
   /** A standard's certificates, newest first. */
   public List<StandardCertificate> certificates(Session session, String tag) {
     return desk.read(
-        session,
-        UseCase.READ_STANDARDS,
-        transaction -> standards.certificates(transaction, tag));
+        session, UseCase.READ_STANDARDS, transaction -> standards.certificates(transaction, tag));
   }
 }
