@@ -41,6 +41,11 @@ public final class Sentences {
         .orElseGet(() -> words.text(FINDING, "verdict.none"));
   }
 
+  /** That degrees of freedom are infinite, where a figure cannot say it. */
+  public String infiniteDegreesOfFreedom() {
+    return words.text(FINDING, "infinite-degrees-of-freedom");
+  }
+
   /** The name of a decision rule. */
   public String rule(DecisionRule rule) {
     return words.name(FINDING, "rule", rule);
@@ -146,7 +151,8 @@ public final class Sentences {
     if (found.n() < planned) {
       return words.text(FINDING, "so-far", said);
     }
-    return words.text(FINDING, "decided", said, rule(rule), verdict(outcome));
+    String sentence = said.substring(0, 1).toUpperCase(words.locale()) + said.substring(1);
+    return words.text(FINDING, "decided", sentence, rule(rule), verdict(outcome));
   }
 
   private static int placesOf(CheckPointFindings found) {
