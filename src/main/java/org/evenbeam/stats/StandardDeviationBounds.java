@@ -48,8 +48,9 @@ public record StandardDeviationBounds(
   }
 
   /**
-   * The same with no upper end below {@code floor}, the {@link EqualReadingsBound} at this n:
-   * readings that nearly all agree say no more than readings that all agree.
+   * The same with the one-sided upper bound not below {@code floor}, the {@link EqualReadingsBound}
+   * at this n: readings that nearly all agree say no more than readings that all agree. The
+   * two-sided interval stays that of chi-square.
    *
    * @throws IllegalArgumentException if {@code floor} is negative or not finite
    */
@@ -59,7 +60,7 @@ public record StandardDeviationBounds(
         standardDeviation,
         degreesOfFreedom,
         alpha,
-        new Interval(interval.low(), Math.max(interval.high(), floor)),
+        interval,
         lowerBound,
         Math.max(upperBound, floor));
   }

@@ -58,8 +58,10 @@ public final class Figures {
     if (value == 0) {
       return "0";
     }
-    return dressed(
-        plain(BigDecimal.valueOf(value).round(new MathContext(digits, RoundingMode.HALF_EVEN))));
+    BigDecimal rounded =
+        BigDecimal.valueOf(value).round(new MathContext(digits, RoundingMode.HALF_EVEN));
+    int missing = digits - rounded.precision();
+    return dressed(plain(missing > 0 ? rounded.setScale(rounded.scale() + missing) : rounded));
   }
 
   /** The decimal places at which a value is written beside an uncertainty of that size. */

@@ -1,0 +1,95 @@
+package org.evenbeam.cli;
+
+import java.io.PrintWriter;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.concurrent.Callable;
+import org.evenbeam.logbook.LogbookException;
+import org.evenbeam.wording.Problems;
+import org.evenbeam.wording.Sentences;
+import org.evenbeam.wording.Words;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Spec;
+
+/** Opens the demonstration laboratory; without a display it does the same job and says so. */
+@Command(
+    name = "demo",
+    mixinStandardHelpOptions = true,
+    description = {
+      "Opens the demonstration laboratory, an invented one.",
+      "Without a display: imports its data, evaluates, writes its certificates and says where."
+    })
+final class DemoCommand implements Callable<Integer> {
+  /** Makes the demonstration for the folder that was asked for. */
+  @FunctionalInterface
+  interface Factory {
+    Demonstration in(Path folderOrNull, boolean fresh);
+  }
+
+  private static final int FAILED = 2;
+
+  @Option(
+      names = "--laboratory",
+      paramLabel = "FOLDER",
+      description =
+          "Where the demonstration laboratory lies; by default in the user's data folder.")
+  private Path folder;
+
+  @Option(names = "--fresh", description = "Put it back to its start first.")
+  private boolean fresh;
+
+  @Option(names = "--headless", description = "Open no window, even where there is a display.")
+  private boolean headless;
+
+  @Spec private CommandSpec spec;
+
+  private final Factory factory;
+  private final Words words;
+  private final Sentences sentences;
+  private final Problems problems;
+
+  DemoCommand(Factory factory, Words words, Sentences sentences, Problems problems) {
+    this.factory = factory;
+    this.words = words;
+    this.sentences = sentences;
+    this.problems = problems;
+  }
+
+  @Override
+  public Integer call() {
+    try {
+      run(factory.in(folder, fresh));
+      return 0;
+    } catch (LogbookException failed) {
+      PrintWriter errors = spec.commandLine().getErr();
+      errors.println(problems.sentence(failed.key(), failed.arguments()));
+      errors.flush();
+      return FAILED;
+    }
+  }
+
+  private void run(Demonstration demonstration) {
+    if (!headless && demonstration.hasDisplay()) {
+      demonstration.openWindow();
+      return;
+    }
+    PrintWriter out = spec.commandLine().getOut();
+    String why = headless ? "demo.headless" : "demo.no-display";
+    out.println(words.text(Words.Bundle.COMMAND, why));
+    out.flush();
+    List<Demonstration.Written> written = demonstration.writeCertificates();
+    for (Demonstration.Written certificate : written) {
+      out.println(
+          "%s  %-8s  %-16s  %s"
+              .formatted(
+                  certificate.number(),
+                  certificate.instrumentTag(),
+                  sentences.verdict(certificate.verdict()),
+                  certificate.file()));
+    }
+    out.println(words.text(Words.Bundle.COMMAND, "demo.written", Integer.toString(written.size())));
+    out.flush();
+  }
+}
