@@ -74,8 +74,8 @@ public final class PictureWords implements Labels {
     }
     PictureContent.Mark mark = (PictureContent.Mark) content;
     return mark.verdict()
-        .map(verdict -> words.name(Words.Bundle.SCREEN, "picture.mark", verdict))
-        .orElseGet(() -> text("mark.none"));
+        .map(verdict -> words.name(Words.Bundle.FINDING, "verdict", verdict))
+        .orElseGet(() -> words.text(Words.Bundle.FINDING, "verdict.none"));
   }
 
   private String beamLimits(Criteria criteria) {

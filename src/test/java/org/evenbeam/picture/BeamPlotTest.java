@@ -100,7 +100,7 @@ class BeamPlotTest {
     Picture picture = Questions.beam(Questions.balance(), two, SIZE);
     assertThat(of(picture, Shape.Arrow.class).map(Shape.Arrow::x))
         .containsExactlyInAnyOrder(0.0, SIZE.width());
-    assertThat(texts(picture)).contains("+0.0029", "−0.0021");
+    assertThat(texts(picture)).contains("+0.00289", "−0.00213");
   }
 
   @Test
@@ -131,7 +131,7 @@ class BeamPlotTest {
     assertThat(Questions.beam(Questions.balance(), List.of(), SIZE).text())
         .isEqualTo("Bias: the limits are −0.0005\u202fg and +0.0005\u202fg. No readings yet.");
     assertThat(Questions.beam(Questions.balance(), SKETCH, SIZE).text())
-        .contains("After 6 readings the bias is +0.00001\u202fg; its 90\u202f% interval");
+        .contains("After 6 readings the bias is +0.000013\u202fg; its 90\u202f% interval");
   }
 
   static Shape.Fulcrum fulcrum(Picture picture) {

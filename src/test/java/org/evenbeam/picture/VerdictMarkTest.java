@@ -22,7 +22,7 @@ class VerdictMarkTest {
   void noVerdictHasNoBeam() {
     Picture picture = VerdictMark.draw(Optional.empty(), 16, Questions.LABELS);
     assertThat(picture.shapes()).singleElement().isInstanceOf(Shape.Fulcrum.class);
-    assertThat(picture.text()).isEqualTo("no verdict yet");
+    assertThat(picture.text()).isEqualTo("no verdict");
   }
 
   @Test
