@@ -127,6 +127,19 @@ class BeamPlotTest {
   }
 
   @Test
+  void veryUnequalLimitsLeaveEveryLabelItsSize() {
+    CheckPointQuestion question =
+        Questions.question(
+            Questions.number("0.0001"),
+            Questions.number("0.02"),
+            Optional.empty(),
+            Questions.number("0.0001"),
+            0);
+    Picture picture = Questions.beam(question, SKETCH, SIZE);
+    assertThat(of(picture, Shape.Label.class).map(Shape.Label::size)).containsOnly(SIZE.text());
+  }
+
+  @Test
   void wordsStandInThePicturesPlace() {
     assertThat(Questions.beam(Questions.balance(), List.of(), SIZE).text())
         .isEqualTo("Bias: the limits are −0.0005\u202fg and +0.0005\u202fg. No readings yet.");
