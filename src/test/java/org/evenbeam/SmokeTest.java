@@ -1,8 +1,0 @@
-package org.evenbeam;
-
-import org.junit.jupiter.api.Test;
-
-class SmokeTest {
-  @Test
-  void runs() {}
-}
