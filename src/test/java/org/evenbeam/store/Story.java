@@ -88,10 +88,11 @@ final class Story {
                       List.of(
                           new UncertaintyTerm(
                               "certificate",
-                              new BigDecimal("0.000025"),
+                              new BigDecimal("0.000050"),
                               Spread.NORMAL,
+                              new BigDecimal("2.0"),
                               Double.POSITIVE_INFINITY),
-                          new UncertaintyTerm(
+                          UncertaintyTerm.of(
                               "drift", new BigDecimal("1.0E-5"), Spread.RECTANGULAR, 12.5)))),
               new CertifiedValue(
                   "50 g", new BigDecimal("50.00"), new UncertaintyBudget(List.of()))));
