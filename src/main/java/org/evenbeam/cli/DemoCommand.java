@@ -22,12 +22,6 @@ import picocli.CommandLine.Spec;
       "Without a display: imports its data, evaluates, writes its certificates and says where."
     })
 final class DemoCommand implements Callable<Integer> {
-  /** Makes the demonstration for the folder that was asked for. */
-  @FunctionalInterface
-  interface Factory {
-    Demonstration in(Path folderOrNull, boolean fresh);
-  }
-
   private static final int FAILED = 2;
 
   @Option(
@@ -45,12 +39,16 @@ final class DemoCommand implements Callable<Integer> {
 
   @Spec private CommandSpec spec;
 
-  private final Factory factory;
+  private final EvenbeamCommand.DemonstrationFactory factory;
   private final Words words;
   private final Sentences sentences;
   private final Problems problems;
 
-  DemoCommand(Factory factory, Words words, Sentences sentences, Problems problems) {
+  DemoCommand(
+      EvenbeamCommand.DemonstrationFactory factory,
+      Words words,
+      Sentences sentences,
+      Problems problems) {
     this.factory = factory;
     this.words = words;
     this.sentences = sentences;

@@ -3,6 +3,7 @@ package org.evenbeam.exchange;
 import de.siegmar.fastcsv.reader.CsvParseException;
 import de.siegmar.fastcsv.reader.CsvReader;
 import de.siegmar.fastcsv.reader.CsvRecord;
+import de.siegmar.fastcsv.reader.FieldMismatchStrategy;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.ByteBuffer;
@@ -67,7 +68,11 @@ final class TableFile {
   private static List<CsvRecord> records(Path file) {
     List<CsvRecord> records = new ArrayList<>();
     try (CsvReader<CsvRecord> reader =
-        CsvReader.builder().skipEmptyLines(true).ofCsvRecord(text(file))) {
+        CsvReader.builder()
+            .skipEmptyLines(true)
+            .extraFieldStrategy(FieldMismatchStrategy.IGNORE)
+            .missingFieldStrategy(FieldMismatchStrategy.IGNORE)
+            .ofCsvRecord(text(file))) {
       Iterator<CsvRecord> iterator = reader.iterator();
       while (iterator.hasNext()) {
         records.add(iterator.next());

@@ -12,6 +12,8 @@ public final class NotFound extends LogbookException {
     INSTRUMENT,
     /** A reference standard by tag. */
     STANDARD,
+    /** A calibration certificate or reference material certificate of a standard, by number. */
+    STANDARD_CERTIFICATE,
     /** A plan by instrument tag. */
     PLAN,
     /** A check point by label. */

@@ -1,5 +1,6 @@
 package org.evenbeam.stats;
 
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -14,28 +15,29 @@ public record CombinedUncertainty(double standardUncertainty, double degreesOfFr
 
   /** Combines components; without any, or with all of them zero, u_c is zero and known. */
   public static CombinedUncertainty of(List<UncertaintyComponent> components) {
-    List<UncertaintyComponent> felt =
-        components.stream().filter(component -> component.standardUncertainty() > 0).toList();
-    if (felt.isEmpty()) {
-      return new CombinedUncertainty(0, Double.POSITIVE_INFINITY);
+    UncertaintyComponent largest = UncertaintyComponent.known(0);
+    int felt = 0;
+    for (UncertaintyComponent component : components) {
+      felt += component.standardUncertainty() > 0 ? 1 : 0;
+      largest =
+          largest.standardUncertainty() < component.standardUncertainty() ? component : largest;
     }
-    return felt.size() == 1
-        ? new CombinedUncertainty(felt.get(0).standardUncertainty(), felt.get(0).degreesOfFreedom())
-        : combined(felt);
+    return felt > 1
+        ? combined(components, largest.standardUncertainty())
+        : new CombinedUncertainty(largest.standardUncertainty(), largest.degreesOfFreedom());
   }
 
   /** Combines components; see {@link #of(List)}. */
   public static CombinedUncertainty of(UncertaintyComponent... components) {
-    return of(List.of(components));
+    return of(Arrays.asList(components));
   }
 
   /** Works on the components relative to the largest, so that no fourth power leaves the range. */
-  private static CombinedUncertainty combined(List<UncertaintyComponent> felt) {
-    double largest =
-        felt.stream().mapToDouble(UncertaintyComponent::standardUncertainty).max().orElseThrow();
+  private static CombinedUncertainty combined(
+      List<UncertaintyComponent> components, double largest) {
     double squares = 0;
     double fourthPowers = 0;
-    for (UncertaintyComponent component : felt) {
+    for (UncertaintyComponent component : components) {
       double relative = component.standardUncertainty() / largest;
       double square = relative * relative;
       squares += square;

@@ -1,15 +1,12 @@
 package org.evenbeam.stats;
 
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
-import org.apache.commons.statistics.distribution.NormalDistribution;
 
 /**
  * The probability that n readings of a normal instrument, rounded to whole digits, are all equal.
  * All lengths are in units of the resolution.
  */
 final class EqualReadings {
-  private static final NormalDistribution NORMAL = NormalDistribution.of(0, 1);
-
   /** Where the sum over cells and its integral agree to more than the solver asks. */
   private static final double SMOOTH_FROM = 100;
 
@@ -43,7 +40,7 @@ final class EqualReadings {
   /** The sigma at which the central cell alone has probability alpha: never above the answer. */
   static double centralCellAlone(int n, double alpha) {
     double outside = -Math.expm1(Math.log(alpha) / n);
-    return 0.5 / NORMAL.inverseSurvivalProbability(outside / 2);
+    return 0.5 / StandardNormal.quantileOfUpperTail(outside / 2);
   }
 
   /** Logarithm of the probability, the true value being in the middle of a cell. */
@@ -69,7 +66,7 @@ final class EqualReadings {
   }
 
   private static double cell(double sigma, double distance) {
-    return NORMAL.probability((distance - 0.5) / sigma, (distance + 0.5) / sigma);
+    return StandardNormal.between((distance - 0.5) / sigma, (distance + 0.5) / sigma);
   }
 
   /**

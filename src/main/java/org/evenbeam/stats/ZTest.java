@@ -1,7 +1,5 @@
 package org.evenbeam.stats;
 
-import org.apache.commons.statistics.distribution.NormalDistribution;
-
 /**
  * The one-sample z test of a bias of zero where the standard deviation is established beforehand:
  * {@code z = b / (sigma / sqrt(n))}. Source: NIST/SEMATECH e-Handbook of Statistical Methods,
@@ -23,8 +21,6 @@ public record ZTest(
     double standardError,
     double criticalValue,
     Interval interval) {
-  private static final NormalDistribution NORMAL = NormalDistribution.of(0, 1);
-
   /**
    * Tests a bias.
    *
@@ -41,12 +37,12 @@ public record ZTest(
     Arguments.significance(alpha);
     double standardError = sigma / Math.sqrt(n);
     double statistic = bias / standardError;
-    double critical = NORMAL.inverseSurvivalProbability(alpha / 2);
+    double critical = StandardNormal.quantileOfUpperTail(alpha / 2);
     return new ZTest(
         statistic,
-        2 * NORMAL.survivalProbability(Math.abs(statistic)),
-        NORMAL.cumulativeProbability(statistic),
-        NORMAL.survivalProbability(statistic),
+        2 * StandardNormal.upperTail(Math.abs(statistic)),
+        StandardNormal.lowerTail(statistic),
+        StandardNormal.upperTail(statistic),
         standardError,
         critical,
         Interval.about(bias, critical * standardError));

@@ -10,6 +10,7 @@ import org.evenbeam.stats.Interval;
 import org.evenbeam.stats.Shown;
 import org.evenbeam.verification.BiasFinding;
 import org.evenbeam.verification.CheckPointFindings;
+import org.evenbeam.verification.CheckRisk;
 import org.evenbeam.verification.Criteria;
 import org.evenbeam.verification.Criterion;
 import org.evenbeam.verification.DecisionRule;
@@ -139,10 +140,33 @@ public final class Sentences {
             "precision." + finding.shown().get().name(),
             figures.withUnit(figures.uncertainty(found.standardDeviation().orElseThrow()), unit),
             figures.percent(1 - criteria.alpha()),
-            figures.withUnit(figures.uncertainty(finding.lowerBound().orElseThrow()), unit),
-            figures.withUnit(figures.uncertainty(finding.upperBound().orElseThrow()), unit),
+            spread(finding.lowerBound().orElseThrow(), unit),
+            spread(finding.upperBound().orElseThrow(), unit),
             precisionLimit(criteria, unit));
     return Optional.of(decided(found, said, criteria.precisionRule(), finding.outcome()));
+  }
+
+  /** What the check could have missed, in one or more sentences. */
+  public List<String> couldHaveMissed(CheckRisk risk, String unit) {
+    List<String> sentences = new ArrayList<>();
+    String readings = Integer.toString(risk.readings());
+    risk.detectableBias()
+        .ifPresent(
+            bias -> sentences.add(words.text(FINDING, "risk.bias", readings, spread(bias, unit))));
+    risk.detectableStandardDeviation()
+        .ifPresent(
+            sd -> sentences.add(words.text(FINDING, "risk.precision", readings, spread(sd, unit))));
+    sentences.add(
+        words.text(
+            FINDING,
+            "risk.assumed." + risk.origin().name(),
+            spread(risk.assumedStandardDeviation(), unit),
+            figures.percent(Math.rint(risk.conformsWithoutBias() * 1000) / 1000)));
+    return sentences;
+  }
+
+  private String spread(double value, String unit) {
+    return figures.withUnit(figures.uncertainty(value), unit);
   }
 
   private String decided(

@@ -1,0 +1,92 @@
+package org.evenbeam.app;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
+import java.util.Comparator;
+import java.util.List;
+import java.util.stream.Stream;
+import org.evenbeam.exchange.LaboratoryImport;
+import org.evenbeam.logbook.StoreFailed;
+import org.evenbeam.logbook.certificates.CertificatePress;
+
+/**
+ * The folder of the demonstration laboratory. It is imported under another name and moved into place when it
+ * is whole, so that a half import is never taken for one.
+ */
+final class DemonstrationFolder {
+  private static final String MARK = "demonstration-laboratory";
+
+  private final Path folder;
+  private final CertificatePress press;
+
+  DemonstrationFolder(Path folder, CertificatePress press) {
+    this.folder = folder.toAbsolutePath().normalize();
+    this.press = press;
+  }
+
+  /** Where it lies. */
+  Path path() {
+    return folder;
+  }
+
+  /**
+   * Imports the laboratory where there is none yet.
+   *
+   * @param fresh whether to put an existing one back to its start
+   * @throws StoreFailed when the folder cannot be written to, or holds something else
+   */
+  void prepare(boolean fresh) {
+    Path beside = folder.resolveSibling(folder.getFileName() + "-import");
+    try {
+      if (Files.exists(folder.resolve(MARK)) && !fresh) {
+        return;
+      }
+      requireOurs();
+      remove(beside);
+      Files.createDirectories(beside);
+      importInto(beside);
+      Files.createFile(beside.resolve(MARK));
+      remove(folder);
+      Files.move(beside, folder, StandardCopyOption.ATOMIC_MOVE);
+    } catch (IOException failed) {
+      throw new StoreFailed(
+          StoreFailed.Reason.READ_ONLY, folder, failed.toString(), failed);
+    }
+  }
+
+  private void importInto(Path beside) {
+    try (OpenLaboratory laboratory = OpenLaboratory.in(beside, press, () -> false)) {
+      laboratory.inBulk(
+          () ->
+              DemonstrationData.read(
+                  tables -> new LaboratoryImport(tables).into(laboratory.logbook())));
+    }
+  }
+
+  /** A folder that holds anything but a demonstration laboratory is left alone. */
+  private void requireOurs() throws IOException {
+    if (!Files.exists(folder) || Files.exists(folder.resolve(MARK))) {
+      return;
+    }
+    try (Stream<Path> content = Files.list(folder)) {
+      if (content.findAny().isPresent()) {
+        throw new IOException("it holds something else than a demonstration laboratory");
+      }
+    }
+  }
+
+  private static void remove(Path tree) throws IOException {
+    if (!Files.exists(tree)) {
+      return;
+    }
+    List<Path> content;
+    try (Stream<Path> walk = Files.walk(tree)) {
+      content = walk.sorted(Comparator.reverseOrder()).toList();
+    }
+    for (Path path : content) {
+      Files.delete(path);
+    }
+  }
+}

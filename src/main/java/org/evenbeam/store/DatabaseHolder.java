@@ -1,0 +1,87 @@
+package org.evenbeam.store;
+
+import java.sql.SQLException;
+import java.util.function.Supplier;
+import org.evenbeam.store.rows.Failures;
+import org.slf4j.Logger;
+import org.slf4j.LoggerFactory;
+
+/**
+ * Holds the open database. A database that could not write, as on a full disk, closes itself; it is
+ * opened again when it is next asked for, so that a person frees some space and goes on.
+ */
+final class DatabaseHolder implements AutoCloseable {
+  private static final Logger LOG = LoggerFactory.getLogger(DatabaseHolder.class);
+
+  private final Supplier<Database> again;
+  private final Failures failures;
+  private Database database;
+  private boolean doubtful;
+  private boolean closed;
+
+  /**
+   * Holds a database.
+   *
+   * @param database open
+   * @param again opens the same again
+   */
+  DatabaseHolder(Database database, Supplier<Database> again, Failures failures) {
+    this.database = database;
+    this.again = again;
+    this.failures = failures;
+  }
+
+  /**
+   * The database.
+   *
+   * @throws IllegalStateException when the logbook is closed
+   * @throws org.evenbeam.logbook.StoreFailed when it has closed itself and cannot be opened again
+   */
+  synchronized Database database() {
+    if (closed) {
+      throw new IllegalStateException("the logbook is closed");
+    }
+    if (doubtful && !database.isAlive()) {
+      abandon();
+      database = again.get();
+    }
+    doubtful = false;
+    return database;
+  }
+
+  /** Says that something failed, so that the database is asked whether it still answers. */
+  synchronized void doubt() {
+    doubtful = true;
+  }
+
+  /** Writes what was committed through to the disk. */
+  void sync() {
+    try {
+      database().sync();
+    } catch (SQLException failed) {
+      doubt();
+      throw failures.of(failed);
+    }
+  }
+
+  @Override
+  public synchronized void close() {
+    if (closed) {
+      return;
+    }
+    closed = true;
+    try {
+      database.close();
+    } catch (SQLException failed) {
+      throw failures.of(failed);
+    }
+  }
+
+  private void abandon() {
+    try {
+      database.close();
+    } catch (SQLException dead) {
+      LOG.warn("The database had closed itself; it is opened again", dead);
+    }
+  }
+}

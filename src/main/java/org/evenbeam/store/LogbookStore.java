@@ -1,0 +1,171 @@
+package org.evenbeam.store;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
+import java.sql.SQLException;
+import java.util.UUID;
+import java.util.function.BooleanSupplier;
+import java.util.function.Supplier;
+import org.evenbeam.logbook.Transactions;
+import org.evenbeam.logbook.certificates.CertificateRecords;
+import org.evenbeam.logbook.history.TrailRecords;
+import org.evenbeam.logbook.instruments.InstrumentRecords;
+import org.evenbeam.logbook.laboratory.LaboratoryRecords;
+import org.evenbeam.logbook.people.PersonRecords;
+import org.evenbeam.logbook.plans.PlanRecords;
+import org.evenbeam.logbook.run.RunRecords;
+import org.evenbeam.logbook.standards.StandardRecords;
+import org.evenbeam.store.rows.Failures;
+import org.evenbeam.store.tables.CertificateTable;
+import org.evenbeam.store.tables.InstrumentTable;
+import org.evenbeam.store.tables.LaboratoryTable;
+import org.evenbeam.store.tables.PersonTable;
+import org.evenbeam.store.tables.PlanTable;
+import org.evenbeam.store.tables.RunTable;
+import org.evenbeam.store.tables.StandardTable;
+import org.evenbeam.store.tables.TrailTable;
+
+/** A laboratory's logbook, open: its transactions and its records. */
+public final class LogbookStore implements AutoCloseable {
+  /**
+   * H2's file system that opens the file again when a thread's interrupt has closed it: a cancelled
+   * background task must not close the logbook.
+   */
+  private static final String THROUGH_INTERRUPTS = "retry:";
+
+  private final StoreTransactions transactions;
+
+  private LogbookStore(StoreTransactions transactions) {
+    this.transactions = transactions;
+  }
+
+  /**
+   * Opens the logbook in a laboratory's folder, or makes it when there is none. One program at a
+   * time can have it open.
+   *
+   * @param laboratoryFolder an existing folder
+   * @param onScreenThread whether the calling thread is the screen's, which the store refuses
+   * @throws org.evenbeam.logbook.StoreFailed IN_USE, READ_ONLY, DISK_FULL, NEWER_SCHEMA, DAMAGED or
+   *     OTHER, naming the file or folder
+   */
+  public static LogbookStore open(Path laboratoryFolder, BooleanSupplier onScreenThread) {
+    return open(laboratoryFolder, onScreenThread, THROUGH_INTERRUPTS);
+  }
+
+  static LogbookStore open(Path laboratoryFolder, BooleanSupplier onScreen, String fileSystem) {
+    LogbookFolder folder = LogbookFolder.at(laboratoryFolder);
+    folder.requireUsable();
+    if (!Files.exists(folder.database())) {
+      create(folder, fileSystem);
+    }
+    Failures failures = new Failures(folder.database());
+    Passwords passwords = Passwords.read(folder.passwords());
+    String url = url(fileSystem, folder.database());
+    Supplier<Database> opener = () -> Database.open(url, passwords, failures);
+    return holding(opener.get(), opener, onScreen, failures);
+  }
+
+  /** A logbook in memory, of its own, gone when it is closed; for tests. */
+  public static LogbookStore openInMemory(BooleanSupplier onScreenThread) {
+    Failures failures = new Failures(Path.of("memory"));
+    String url = "jdbc:h2:mem:" + UUID.randomUUID();
+    Passwords passwords = Passwords.random();
+    return holding(
+        Database.create(url, passwords, failures),
+        () -> Database.open(url, passwords, failures),
+        onScreenThread,
+        failures);
+  }
+
+  /** Its transactions. */
+  public Transactions transactions() {
+    return transactions;
+  }
+
+  /**
+   * Runs work with many changes, such as an import. Each is whole or not at all as ever, but they
+   * are on the disk together, when this returns. Other threads' changes wait.
+   *
+   * @throws org.evenbeam.logbook.StoreFailed when the store cannot do it
+   */
+  public void inBulk(Runnable work) {
+    transactions.inBulk(work);
+  }
+
+  /** The laboratory's own facts. */
+  public LaboratoryRecords laboratory() {
+    return new LaboratoryTable();
+  }
+
+  /** People. */
+  public PersonRecords people() {
+    return new PersonTable();
+  }
+
+  /** Instruments. */
+  public InstrumentRecords instruments() {
+    return new InstrumentTable();
+  }
+
+  /** Reference standards. */
+  public StandardRecords standards() {
+    return new StandardTable();
+  }
+
+  /** Verification plans. */
+  public PlanRecords plans() {
+    return new PlanTable();
+  }
+
+  /** Runs. */
+  public RunRecords runs() {
+    return new RunTable();
+  }
+
+  /** Certificates. */
+  public CertificateRecords certificates() {
+    return new CertificateTable();
+  }
+
+  /** The audit trail. */
+  public TrailRecords trail() {
+    return new TrailTable();
+  }
+
+  /** Closes the logbook, after the change at work, if any. */
+  @Override
+  public void close() {
+    transactions.close();
+  }
+
+  private static LogbookStore holding(
+      Database database,
+      Supplier<Database> again,
+      BooleanSupplier onScreenThread,
+      Failures failures) {
+    DatabaseHolder holder = new DatabaseHolder(database, again, failures);
+    return new LogbookStore(new StoreTransactions(holder, onScreenThread, failures));
+  }
+
+  /** Makes the database under another name, so that a half-made one is never taken for one. */
+  private static void create(LogbookFolder folder, String fileSystem) {
+    Failures failures = new Failures(folder.database());
+    try {
+      if (!Files.exists(folder.passwords())) {
+        Passwords.random().write(folder.passwords());
+      }
+      Files.deleteIfExists(folder.newDatabase());
+      Passwords passwords = Passwords.read(folder.passwords());
+      Database.create(url(fileSystem, folder.newDatabase()), passwords, failures).close();
+      Files.move(folder.newDatabase(), folder.database(), StandardCopyOption.ATOMIC_MOVE);
+    } catch (IOException | SQLException failed) {
+      throw failures.of(failed);
+    }
+  }
+
+  private static String url(String fileSystem, Path database) {
+    return "jdbc:h2:" + fileSystem + LogbookFolder.withoutEnding(database);
+  }
+}
