@@ -5,8 +5,8 @@ import java.util.Locale;
 import java.util.Map;
 
 /**
- * Where the program keeps its data: the platform's folder for it (on Linux by the XDG Base Directory
- * Specification).
+ * Where the program keeps its data: the platform's folder for it (on Linux by the XDG Base
+ * Directory Specification).
  */
 final class DataFolders {
   private static final String NAME = "evenbeam";

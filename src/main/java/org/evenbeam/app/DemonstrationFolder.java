@@ -12,8 +12,8 @@ import org.evenbeam.logbook.StoreFailed;
 import org.evenbeam.logbook.certificates.CertificatePress;
 
 /**
- * The folder of the demonstration laboratory. It is imported under another name and moved into place when it
- * is whole, so that a half import is never taken for one.
+ * The folder of the demonstration laboratory. It is imported under another name and moved into
+ * place when it is whole, so that a half import is never taken for one.
  */
 final class DemonstrationFolder {
   private static final String MARK = "demonstration-laboratory";
@@ -51,8 +51,7 @@ final class DemonstrationFolder {
       remove(folder);
       Files.move(beside, folder, StandardCopyOption.ATOMIC_MOVE);
     } catch (IOException failed) {
-      throw new StoreFailed(
-          StoreFailed.Reason.READ_ONLY, folder, failed.toString(), failed);
+      throw new StoreFailed(StoreFailed.Reason.READ_ONLY, folder, failed.toString(), failed);
     }
   }
 

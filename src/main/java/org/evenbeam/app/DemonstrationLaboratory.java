@@ -18,7 +18,9 @@ import org.evenbeam.logbook.open.OpenLogbook;
 
 /** The demonstration laboratory, with a window or without. */
 final class DemonstrationLaboratory implements Demonstration {
-  /** Who keeps the demonstration laboratory; its password stands in demo-data, for everyone to read. */
+  /**
+   * Who keeps the demonstration laboratory; its password stands in demo-data, for everyone to read.
+   */
   private static final String KEEPER = "maren";
 
   private static final String KEEPERS_PASSWORD = "lowwater";
@@ -66,8 +68,7 @@ final class DemonstrationLaboratory implements Demonstration {
       for (CertificateFacts facts : history) {
         Path file = target.resolve(facts.number() + ".pdf");
         Files.write(file, certificates.document(session, facts.number()));
-        written.add(
-            new Written(facts.number(), facts.instrumentTag(), facts.verdict(), file));
+        written.add(new Written(facts.number(), facts.instrumentTag(), facts.verdict(), file));
       }
       return written;
     } catch (IOException unwritable) {
@@ -79,7 +80,6 @@ final class DemonstrationLaboratory implements Demonstration {
     Laboratory laboratory = logbook.laboratory().find().orElseThrow();
     return logbook
         .people()
-        .signIn(
-            KEEPER, KEEPERS_PASSWORD.toCharArray(), laboratory.zone(), Clock.systemUTC());
+        .signIn(KEEPER, KEEPERS_PASSWORD.toCharArray(), laboratory.zone(), Clock.systemUTC());
   }
 }

@@ -80,8 +80,7 @@ final class OpenLaboratory implements AutoCloseable {
         new Instruments(desk, store.instruments()),
         new Standards(desk, store.standards()),
         new Plans(desk, store.plans(), store.instruments(), store.standards()),
-        new Runs(
-            desk, store.runs(), store.instruments(), store.standards(), store.plans(), sheets),
+        new Runs(desk, store.runs(), store.instruments(), store.standards(), store.plans(), sheets),
         new Bench(desk, store.runs(), sheets),
         new Submissions(desk, store.runs(), store.instruments(), sheets, people),
         new SignOff(desk, store.runs(), sheets, people),

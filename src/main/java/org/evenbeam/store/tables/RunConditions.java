@@ -12,7 +12,7 @@ import org.evenbeam.metrology.TypedDecimal;
 import org.evenbeam.store.rows.ColumnTypes;
 import org.evenbeam.store.rows.OpenTransaction;
 import org.evenbeam.store.rows.Row;
-import org.evenbeam.verification.plan.Condition;
+import org.evenbeam.verification.Condition;
 import org.evenbeam.verification.plan.Conditions;
 import org.jdbi.v3.core.statement.StatementContext;
 
