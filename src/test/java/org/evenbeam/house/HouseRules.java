@@ -35,7 +35,11 @@ final class HouseRules {
         new Sees(
             List.of("metrology", "stats"), "decisions are pure: no store, no screen, no text"));
     SEES.put("picture", new Sees(pure, "a picture is described once, for screen and paper"));
-    SEES.put("wording", new Sees(pure, "sentences are made from codes, never from records kept"));
+    SEES.put(
+        "wording",
+        new Sees(
+            List.of("picture", "verification", "metrology", "stats"),
+            "sentences are made from codes, never from records kept"));
     SEES.put("trail", new Sees(List.of(), "the offline checker uses it without the rest"));
     SEES.put(
         "logbook",

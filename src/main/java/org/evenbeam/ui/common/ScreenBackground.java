@@ -1,0 +1,59 @@
+package org.evenbeam.ui.common;
+
+import java.lang.System.Logger.Level;
+import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.CompletionException;
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+import java.util.function.Consumer;
+import java.util.function.Supplier;
+import javafx.application.Platform;
+import org.evenbeam.logbook.LogbookException;
+
+/**
+ * One thread for the logbook's work, so that it keeps its order; results arrive on the screen's.
+ */
+public final class ScreenBackground implements Background, AutoCloseable {
+  private static final System.Logger LOGGER = System.getLogger(ScreenBackground.class.getName());
+
+  private final ExecutorService worker =
+      Executors.newSingleThreadExecutor(
+          work -> {
+            Thread thread = new Thread(work, "logbook work");
+            thread.setDaemon(false);
+            return thread;
+          });
+
+  @Override
+  public <T> void run(Supplier<T> work, Consumer<T> done, Consumer<Throwable> failed) {
+    CompletableFuture.supplyAsync(work, worker)
+        .whenComplete(
+            (result, thrown) ->
+                Platform.runLater(
+                    () -> {
+                      if (thrown == null) {
+                        done.accept(result);
+                      } else {
+                        failed.accept(logged(cause(thrown)));
+                      }
+                    }));
+  }
+
+  private static Throwable cause(Throwable thrown) {
+    return thrown instanceof CompletionException && thrown.getCause() != null
+        ? thrown.getCause()
+        : thrown;
+  }
+
+  private static Throwable logged(Throwable thrown) {
+    boolean refusal = thrown instanceof LogbookException && thrown.getCause() == null;
+    LOGGER.log(refusal ? Level.DEBUG : Level.ERROR, "Work for the screen failed", thrown);
+    return thrown;
+  }
+
+  /** Lets the work in hand finish and takes no more. */
+  @Override
+  public void close() {
+    worker.shutdown();
+  }
+}

@@ -1,0 +1,2 @@
+/** Signing in. */
+package org.evenbeam.ui.signin;
