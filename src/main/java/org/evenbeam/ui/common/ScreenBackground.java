@@ -26,17 +26,18 @@ public final class ScreenBackground implements Background, AutoCloseable {
 
   @Override
   public <T> void run(Supplier<T> work, Consumer<T> done, Consumer<Throwable> failed) {
-    CompletableFuture.supplyAsync(work, worker)
-        .whenComplete(
-            (result, thrown) ->
-                Platform.runLater(
-                    () -> {
-                      if (thrown == null) {
-                        done.accept(result);
-                      } else {
-                        failed.accept(logged(cause(thrown)));
-                      }
-                    }));
+    CompletableFuture<T> unused =
+        CompletableFuture.supplyAsync(work, worker)
+            .whenComplete(
+                (result, thrown) ->
+                    Platform.runLater(
+                        () -> {
+                          if (thrown == null) {
+                            done.accept(result);
+                          } else {
+                            failed.accept(logged(cause(thrown)));
+                          }
+                        }));
   }
 
   private static Throwable cause(Throwable thrown) {
