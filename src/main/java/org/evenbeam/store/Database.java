@@ -78,15 +78,17 @@ final class Database implements AutoCloseable {
       addEverydayUser(owner, passwords);
       JdbcConnectionPool pool = JdbcConnectionPool.create(url, EVERYDAY, passwords.everyday());
       pool.setMaxConnections(MOST_CONNECTIONS);
-      return new Database(owner, pool);
+      Database database = new Database(owner, pool);
+      opened = true;
+      return database;
     } catch (SQLException refused) {
-      closeAfter(refused, owner);
       throw WRONG_PASSWORD.equals(refused.getSQLState())
           ? new Failures(passwords.file()).because(Reason.DAMAGED, refused)
           : failures.of(refused);
-    } catch (RuntimeException refused) {
-      closeAfter(refused, owner);
-      throw refused;
+    } finally {
+      if (!opened) {
+        abandon(owner);
+      }
     }
   }
 
