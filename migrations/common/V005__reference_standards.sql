@@ -46,6 +46,7 @@ create table uncertainty_term (
   name               varchar(200) not null,
   stated             varchar(120) not null,
   spread             varchar(20)  not null,
+  coverage_factor    varchar(120) not null,
   degrees_of_freedom varchar(30)  not null,
   constraint uncertainty_term_key primary key (id),
   constraint uncertainty_term_position_once unique (certified_value_id, position),

@@ -1,5 +1,6 @@
 package org.evenbeam.exchange;
 
+import java.math.BigDecimal;
 import java.nio.file.Path;
 import java.time.LocalDate;
 import java.time.format.DateTimeParseException;
@@ -20,7 +21,15 @@ final class CertificateTables {
       List.of("standard", "number", "issued_by", "traceability", "issued", "expires");
   private static final List<String> VALUES = List.of("standard", "certificate", "label", "value");
   private static final List<String> TERMS =
-      List.of("standard", "certificate", "label", "name", "stated", "spread", "degrees_of_freedom");
+      List.of(
+          "standard",
+          "certificate",
+          "label",
+          "name",
+          "stated",
+          "spread",
+          "coverage_factor",
+          "degrees_of_freedom");
 
   private final Path folder;
 
@@ -86,6 +95,7 @@ final class CertificateTables {
         row.text("name"),
         row.requiredNumber("stated"),
         LaboratoryTables.constant(row, "spread", Spread.class),
+        row.positive("coverage_factor").orElse(BigDecimal.ONE),
         row.number("degrees_of_freedom").map(Number::doubleValue).orElse(Double.POSITIVE_INFINITY));
   }
 

@@ -111,6 +111,17 @@ public final class ExactSample {
     return deviations;
   }
 
+  /** The sum of squared differences between successive readings, right to the last bit. */
+  public double sumOfSquaredDifferences() {
+    BigInteger squares = BigInteger.ZERO;
+    for (int i = 1; i < n(); i++) {
+      BigDecimal difference = readings.get(i).subtract(readings.get(i - 1));
+      BigInteger unscaled = Ratio.unscaled(difference, scale);
+      squares = squares.add(unscaled.multiply(unscaled));
+    }
+    return Ratio.ofScaled(squares, BigInteger.ONE, 2 * scale).toDouble();
+  }
+
   /** Whether all readings have the same value, whatever zeros were typed after it. */
   public boolean allEqual() {
     return spread().signum() == 0;

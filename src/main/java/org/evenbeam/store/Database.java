@@ -25,6 +25,7 @@ final class Database implements AutoCloseable {
 
   private static final String OWNERS_SETTINGS =
       ";WRITE_DELAY=0;DB_CLOSE_ON_EXIT=FALSE;TRACE_LEVEL_FILE=0";
+  private static final String WRONG_PASSWORD = "28000";
   private static final int MOST_CONNECTIONS = 16;
   private static final int ANSWERS_WITHIN_SECONDS = 5;
 
@@ -76,7 +77,9 @@ final class Database implements AutoCloseable {
       return new Database(owner, pool);
     } catch (SQLException refused) {
       closeAfter(refused, owner);
-      throw failures.of(refused);
+      throw WRONG_PASSWORD.equals(refused.getSQLState())
+          ? new Failures(passwords.file()).because(Reason.DAMAGED, refused)
+          : failures.of(refused);
     } catch (RuntimeException refused) {
       closeAfter(refused, owner);
       throw refused;

@@ -69,9 +69,10 @@ public final class LogbookStore implements AutoCloseable {
 
   /** A logbook in memory, of its own, gone when it is closed; for tests. */
   public static LogbookStore openInMemory(BooleanSupplier onScreenThread) {
-    Failures failures = new Failures(Path.of("memory"));
+    Path nowhere = Path.of("memory");
+    Failures failures = new Failures(nowhere);
     String url = "jdbc:h2:mem:" + UUID.randomUUID();
-    Passwords passwords = Passwords.random();
+    Passwords passwords = Passwords.random(nowhere);
     return holding(
         Database.create(url, passwords, failures),
         () -> Database.open(url, passwords, failures),
@@ -154,7 +155,7 @@ public final class LogbookStore implements AutoCloseable {
     Failures failures = new Failures(folder.database());
     try {
       if (!Files.exists(folder.passwords())) {
-        Passwords.random().write(folder.passwords());
+        Passwords.random(folder.passwords()).write();
       }
       Files.deleteIfExists(folder.newDatabase());
       Passwords passwords = Passwords.read(folder.passwords());

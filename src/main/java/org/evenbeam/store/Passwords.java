@@ -25,14 +25,16 @@ import org.evenbeam.store.rows.Failures;
  * keep a program that reaches the database by the everyday user from doing more than that user may;
  * they do not keep out whoever can read the folder.
  *
+ * @param file where they are kept
  * @param owner of the user who owns tables and guards
  * @param everyday of the user by whom every use case works
  */
-record Passwords(String owner, String everyday) {
+record Passwords(Path file, String owner, String everyday) {
   private static final Pattern FORM = Pattern.compile("[0-9a-f]{64}");
 
-  static Passwords random() {
-    return new Passwords(randomDigits(), randomDigits());
+  /** New ones, to be kept in that file. */
+  static Passwords random(Path file) {
+    return new Passwords(file, randomDigits(), randomDigits());
   }
 
   /**
@@ -47,11 +49,12 @@ record Passwords(String owner, String everyday) {
     } catch (IOException | IllegalArgumentException unreadable) {
       throw new Failures(file).because(Reason.DAMAGED, unreadable);
     }
-    return new Passwords(digits(file, properties, "owner"), digits(file, properties, "everyday"));
+    return new Passwords(
+        file, digits(file, properties, "owner"), digits(file, properties, "everyday"));
   }
 
-  /** Keeps them in the file, which is there whole or not at all. */
-  void write(Path file) throws IOException {
+  /** Keeps them in their file, which is there whole or not at all. */
+  void write() throws IOException {
     Path part = file.resolveSibling(file.getFileName() + ".part");
     Files.deleteIfExists(part);
     Files.createFile(part, ownerOnly());

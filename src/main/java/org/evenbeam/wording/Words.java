@@ -5,6 +5,7 @@ import java.util.EnumMap;
 import java.util.Locale;
 import java.util.Map;
 import java.util.ResourceBundle;
+import java.util.stream.Collectors;
 
 /** Texts by key in one language, from resource bundles. */
 public final class Words {
@@ -49,6 +50,12 @@ public final class Words {
   public String text(Bundle bundle, String key, String... arguments) {
     String pattern = bundles.get(bundle).getString(key);
     return new MessageFormat(pattern, locale).format(arguments);
+  }
+
+  /** Every text of a bundle that takes no argument, by its key. */
+  public Map<String, String> all(Bundle bundle) {
+    ResourceBundle texts = bundles.get(bundle);
+    return texts.keySet().stream().collect(Collectors.toMap(key -> key, key -> text(bundle, key)));
   }
 
   /** The name of a constant, from the key {@code prefix.CONSTANT}. */

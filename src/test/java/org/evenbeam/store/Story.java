@@ -35,6 +35,9 @@ import org.evenbeam.metrology.Spread;
 import org.evenbeam.metrology.TypedDecimal;
 import org.evenbeam.metrology.UncertaintyBudget;
 import org.evenbeam.metrology.UncertaintyTerm;
+import org.evenbeam.store.rows.OpenTransaction;
+import org.evenbeam.store.rows.Row;
+import org.evenbeam.store.rows.TrailedTable;
 import org.evenbeam.verification.Criterion;
 import org.evenbeam.verification.DecisionRule;
 import org.evenbeam.verification.Verdict;
@@ -88,10 +91,11 @@ final class Story {
                       List.of(
                           new UncertaintyTerm(
                               "certificate",
-                              new BigDecimal("0.000025"),
+                              new BigDecimal("0.000050"),
                               Spread.NORMAL,
+                              new BigDecimal("2.0"),
                               Double.POSITIVE_INFINITY),
-                          new UncertaintyTerm(
+                          UncertaintyTerm.of(
                               "drift", new BigDecimal("1.0E-5"), Spread.RECTANGULAR, 12.5)))),
               new CertifiedValue(
                   "50 g", new BigDecimal("50.00"), new UncertaintyBudget(List.of()))));
@@ -349,7 +353,19 @@ final class Story {
     does(
         UseCase.KEEP_CERTIFICATE_DOCUMENT,
         t -> store.certificates().addDocument(t, "2026-00001", DOCUMENT, NOON));
+    does(UseCase.ISSUE_CERTIFICATE, this::withdraw);
     return this;
+  }
+
+  private void withdraw(Transaction transaction) {
+    OpenTransaction.rows(transaction)
+        .addNumbered(
+            Row.of(TrailedTable.CERTIFICATE_EVENT)
+                .with("number", "2026-00001")
+                .with("kind", "WITHDRAWN")
+                .with("at", NOON)
+                .with("person_id", manager)
+                .with("reason", "The weight was the wrong one"));
   }
 
   Reading correctionOf(long reading, String checkPoint, int position, String typed) {

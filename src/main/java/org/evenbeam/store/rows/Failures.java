@@ -142,7 +142,7 @@ public final class Failures {
   private boolean isSpaceUsedUp() {
     Path folder = where.toAbsolutePath().getParent();
     return folder != null
-        && folder.toFile().isDirectory()
+        && folder.toFile().getTotalSpace() > 0
         && folder.toFile().getUsableSpace() < HARDLY_ANY_SPACE;
   }
 

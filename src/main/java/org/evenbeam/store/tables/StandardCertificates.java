@@ -71,7 +71,7 @@ final class StandardCertificates {
     return new UncertaintyBudget(
         handle
             .createQuery(
-                "select name, stated, spread, degrees_of_freedom from uncertainty_term"
+                "select name, stated, spread, coverage_factor, degrees_of_freedom from uncertainty_term"
                     + " where certified_value_id = :value order by position")
             .bind("value", valueId)
             .map(
@@ -80,6 +80,7 @@ final class StandardCertificates {
                         row.getString("name"),
                         ColumnTypes.decimal(row, "stated"),
                         Spread.valueOf(row.getString("spread")),
+                        ColumnTypes.decimal(row, "coverage_factor"),
                         Double.parseDouble(row.getString("degrees_of_freedom"))))
             .list());
   }

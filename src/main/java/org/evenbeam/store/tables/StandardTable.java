@@ -117,6 +117,7 @@ public final class StandardTable implements StandardRecords {
               .with("name", term.name())
               .with("stated", term.stated())
               .with("spread", term.spread())
+              .with("coverage_factor", term.coverageFactor())
               .with("degrees_of_freedom", term.degreesOfFreedom()));
     }
   }

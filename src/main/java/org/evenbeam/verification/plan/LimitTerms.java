@@ -72,6 +72,7 @@ public record LimitTerms(
   }
 
   private static BigDecimal share(BigDecimal percent, BigDecimal whole) {
-    return percent.multiply(whole).movePointLeft(2);
+    BigDecimal share = percent.multiply(whole).movePointLeft(2).stripTrailingZeros();
+    return share.scale() < 0 ? share.setScale(0) : share;
   }
 }
