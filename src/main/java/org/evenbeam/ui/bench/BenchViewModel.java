@@ -121,7 +121,7 @@ public final class BenchViewModel {
             kind,
             kind == RunKind.AS_LEFT ? starts.get().asLeftOf() : Optional.empty());
     problem.set("");
-    background.run(() -> logbook.runs().start(session, wanted), openRun::accept, this::fail);
+    background.run(() -> logbook.runs().start(session, wanted), openRun, this::fail);
   }
 
   /** Opens a draft, or takes a returned run up again and opens it. */
@@ -134,7 +134,7 @@ public final class BenchViewModel {
           return run.number();
         };
     problem.set("");
-    background.run(takenUp, openRun::accept, this::fail);
+    background.run(takenUp, openRun, this::fail);
   }
 
   /** Records what happened to the chosen instrument. */

@@ -2,7 +2,6 @@ package org.evenbeam.ui.runsheet;
 
 import java.util.List;
 import java.util.Optional;
-import java.util.function.Consumer;
 import javafx.geometry.Pos;
 import javafx.scene.control.Button;
 import javafx.scene.control.ListView;
@@ -131,7 +130,8 @@ public final class RunSheetPane extends StackPane {
             texts.text("correct.do"));
     ask.ask(
         question,
-        (answers, close) -> model.correct(line, answers.get(0), answers.get(1), close, refused()));
+        (answers, close) ->
+            model.correct(line, answers.get(0), answers.get(1), close, this::refused));
   }
 
   private void askToStrike(ReadingLine line) {
@@ -141,7 +141,7 @@ public final class RunSheetPane extends StackPane {
             texts.text("strike.explanation"),
             List.of(AskPane.Field.text(texts.text("strike.cause"))),
             texts.text("strike.do"));
-    ask.ask(question, (answers, close) -> model.strike(line, answers.get(0), close, refused()));
+    ask.ask(question, (answers, close) -> model.strike(line, answers.get(0), close, this::refused));
   }
 
   private void askToSubmit() {
@@ -160,7 +160,7 @@ public final class RunSheetPane extends StackPane {
             texts.text(verdict ? "submit.sign" : "submit.sign-without-verdict"));
     ask.ask(
         question,
-        (answers, close) -> model.submit(answers.get(0), !verdict, closed(close), refused()));
+        (answers, close) -> model.submit(answers.get(0), !verdict, closed(close), this::refused));
   }
 
   private void askToAbandon() {
@@ -170,7 +170,8 @@ public final class RunSheetPane extends StackPane {
             texts.text("abandon.explanation"),
             List.of(AskPane.Field.text(texts.text("reason"))),
             texts.text("abandon.do"));
-    ask.ask(question, (answers, close) -> model.abandon(answers.get(0), closed(close), refused()));
+    ask.ask(
+        question, (answers, close) -> model.abandon(answers.get(0), closed(close), this::refused));
   }
 
   private Runnable closed(Runnable close) {
@@ -180,8 +181,8 @@ public final class RunSheetPane extends StackPane {
     };
   }
 
-  private Consumer<String> refused() {
-    return problem -> ask.problem().set(problem);
+  private void refused(String problem) {
+    ask.problem().set(problem);
   }
 
   private long number() {
