@@ -30,13 +30,11 @@ final class Logs {
     Path logs = folder.resolve("log");
     try {
       Files.createDirectories(logs);
-      FileHandler file =
-          new FileHandler(logs + "/evenbeam-%g.log", LARGEST_BYTES, KEPT, true);
+      FileHandler file = new FileHandler(logs + "/evenbeam-%g.log", LARGEST_BYTES, KEPT, true);
       file.setFormatter(new SimpleFormatter());
       Logger.getLogger("").addHandler(file);
     } catch (IOException unwritable) {
-      throw new StoreFailed(
-          StoreFailed.Reason.READ_ONLY, logs, unwritable.toString(), unwritable);
+      throw new StoreFailed(StoreFailed.Reason.READ_ONLY, logs, unwritable.toString(), unwritable);
     }
   }
 }

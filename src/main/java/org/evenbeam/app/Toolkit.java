@@ -9,7 +9,8 @@ final class Toolkit {
   /**
    * Starts it and runs the work on its thread.
    *
-   * @throws NoDisplay when it cannot start: the display does not answer, or a library of the system is missing
+   * @throws NoDisplay when it cannot start: the display does not answer, or a library of the system
+   *     is missing
    */
   static void start(Runnable work) {
     Platform.setImplicitExit(false);

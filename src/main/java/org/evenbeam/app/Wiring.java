@@ -30,16 +30,11 @@ public final class Wiring {
    * @param press prints certificates
    * @param cost what a guess at a password costs
    */
-  public static OpenLogbook over(
-      LogbookStore store, CertificatePress press, Passwords.Cost cost) {
+  public static OpenLogbook over(LogbookStore store, CertificatePress press, Passwords.Cost cost) {
     Transactions transactions = store.transactions();
     Desk desk = new Desk(transactions);
     People people =
-        new People(
-            transactions,
-            desk,
-            store.people(),
-            new Passwords(new SecureRandom(), cost));
+        new People(transactions, desk, store.people(), new Passwords(new SecureRandom(), cost));
     SheetReader sheets =
         new SheetReader(
             store.runs(),

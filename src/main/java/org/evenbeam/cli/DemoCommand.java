@@ -39,10 +39,7 @@ final class DemoCommand implements Callable<Integer> {
   private final Words words;
   private final Sentences sentences;
 
-  DemoCommand(
-      EvenbeamCommand.DemonstrationFactory factory,
-      Words words,
-      Sentences sentences) {
+  DemoCommand(EvenbeamCommand.DemonstrationFactory factory, Words words, Sentences sentences) {
     this.factory = factory;
     this.words = words;
     this.sentences = sentences;

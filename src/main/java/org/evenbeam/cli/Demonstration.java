@@ -20,7 +20,9 @@ public interface Demonstration {
   /** Whether there is a display to open a window on. */
   boolean hasDisplay();
 
-  /** Opens the window on the demonstration laboratory; returns the exit status when it is closed. */
+  /**
+   * Opens the window on the demonstration laboratory; returns the exit status when it is closed.
+   */
   int openWindow();
 
   /** Does the same job without a window: imports, evaluates and writes the certificates. */

@@ -81,8 +81,7 @@ class BundlesTest {
   void everyNoteHasItsSentence() {
     Map<String, String> findings = words.all(Words.Bundle.FINDING);
     for (Class<?> note : Note.class.getPermittedSubclasses()) {
-      assertThat(findings.keySet())
-          .anyMatch(key -> key.startsWith("note." + note.getSimpleName()));
+      assertThat(findings.keySet()).anyMatch(key -> key.startsWith("note." + note.getSimpleName()));
     }
   }
 

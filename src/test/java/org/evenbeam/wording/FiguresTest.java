@@ -38,7 +38,12 @@ class FiguresTest {
   }
 
   @ParameterizedTest
-  @CsvSource({"0.05, '5\u202f%'", "0.9, '90\u202f%'", "0.999, '99.9\u202f%'", "1e-12, '1e−10\u202f%'"})
+  @CsvSource({
+    "0.05, '5\u202f%'",
+    "0.9, '90\u202f%'",
+    "0.999, '99.9\u202f%'",
+    "1e-12, '1e−10\u202f%'"
+  })
   void aShareIsWrittenInPercent(double share, String written) {
     assertThat(figures.percent(share)).isEqualTo(written);
   }

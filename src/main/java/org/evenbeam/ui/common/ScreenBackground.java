@@ -26,18 +26,19 @@ public final class ScreenBackground implements Background, AutoCloseable {
 
   @Override
   public <T> void run(Supplier<T> work, Consumer<T> done, Consumer<Throwable> failed) {
-    CompletableFuture<T> unused =
-        CompletableFuture.supplyAsync(work, worker)
-            .whenComplete(
-                (result, thrown) ->
-                    Platform.runLater(
-                        () -> {
-                          if (thrown == null) {
-                            done.accept(result);
-                          } else {
-                            failed.accept(logged(cause(thrown)));
-                          }
-                        }));
+    CompletableFuture<T> running = CompletableFuture.supplyAsync(work, worker);
+    var unused =
+        running.whenComplete(
+            (result, thrown) -> Platform.runLater(() -> deliver(result, thrown, done, failed)));
+  }
+
+  private static <T> void deliver(
+      T result, Throwable thrown, Consumer<T> done, Consumer<Throwable> failed) {
+    if (thrown == null) {
+      done.accept(result);
+    } else {
+      failed.accept(logged(cause(thrown)));
+    }
   }
 
   private static Throwable cause(Throwable thrown) {

@@ -90,17 +90,13 @@ class CertificatesTest {
     bench.correct(laboratory.technician(), run, readings.get(1).id(), "20.0002", "mistyped");
     bench.strike(laboratory.technician(), run, readings.get(3).id(), "door slammed");
     bench.enter(laboratory.technician(), run, TestLaboratory.POINT, "20.0001");
-    laboratory
-        .logbook()
-        .submissions()
-        .submit(laboratory.technician(), run, password(), false);
+    laboratory.logbook().submissions().submit(laboratory.technician(), run, password(), false);
     laboratory.logbook().signOff().approve(laboratory.manager(), run, password(), "");
 
     String text =
         text(
             certificates()
-                .document(
-                    laboratory.auditor(), certificates().issue(laboratory.manager(), run)));
+                .document(laboratory.auditor(), certificates().issue(laboratory.manager(), run)));
 
     assertThat(text).contains("Reading 2: 20.0500 was corrected to 20.0002").contains("mistyped");
     assertThat(text).contains("Reading 4, 20.0100, was struck").contains("door slammed");
@@ -163,7 +159,6 @@ class CertificatesTest {
     CertificateData data = LastingJson.read(record.data(), CertificateData.class);
     assertThat(LastingJson.write(data)).isEqualTo(record.data());
     assertThat(data.sheet().findings().verdict()).isPresent();
-    assertThat(data.sheet().contentSha256())
-        .isEqualTo(data.signatures().get(0).contentSha256());
+    assertThat(data.sheet().contentSha256()).isEqualTo(data.signatures().get(0).contentSha256());
   }
 }

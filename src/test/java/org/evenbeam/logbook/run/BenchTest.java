@@ -99,8 +99,7 @@ class BenchTest {
         .singleElement()
         .satisfies(reading -> assertThat(reading.value().text()).isEqualTo("20.0001"));
     assertThat(point(run).counting().get(0).position()).isEqualTo(1);
-    assertThatThrownBy(
-            () -> bench().correct(laboratory.technician(), run, old, "20.0002", "again"))
+    assertThatThrownBy(() -> bench().correct(laboratory.technician(), run, old, "20.0002", "again"))
         .hasMessageContaining("run-reading-no-longer-counts");
   }
 
@@ -135,10 +134,7 @@ class BenchTest {
             () ->
                 bench()
                     .enterColumn(
-                        laboratory.technician(),
-                        run,
-                        POINT,
-                        List.of("20.0001", "", "20.00o2")))
+                        laboratory.technician(), run, POINT, List.of("20.0001", "", "20.00o2")))
         .hasMessageContaining("reading-in-line-refused [3");
     assertThat(point(run).readings()).isEmpty();
 

@@ -80,21 +80,14 @@ class RunsTest {
     laboratory
         .logbook()
         .bench()
-        .recordConditions(
-            laboratory.technician(),
-            run,
-            TestConditions.of("28", "45", "1013"));
+        .recordConditions(laboratory.technician(), run, TestConditions.of("28", "45", "1013"));
 
     assertThat(sheet(run).findings().verdict()).isEmpty();
     assertThat(sheet(run).findings().notes())
-        .containsExactly(
-            new Note.ConditionOutside(Condition.TEMPERATURE));
+        .containsExactly(new Note.ConditionOutside(Condition.TEMPERATURE));
 
     RunFindings findings =
-        laboratory
-            .logbook()
-            .submissions()
-            .submit(laboratory.technician(), run, password(), true);
+        laboratory.logbook().submissions().submit(laboratory.technician(), run, password(), true);
     assertThat(findings.verdict()).isEmpty();
     assertThat(state(run)).isEqualTo(RunState.SUBMITTED);
   }
@@ -104,10 +97,7 @@ class RunsTest {
     long run = laboratory.measured("20.0021", "20.0022", "20.0020", "20.0021");
 
     RunFindings findings =
-        laboratory
-            .logbook()
-            .submissions()
-            .submit(laboratory.technician(), run, password(), false);
+        laboratory.logbook().submissions().submit(laboratory.technician(), run, password(), false);
 
     assertThat(findings.verdict()).contains(Verdict.DOES_NOT_CONFORM);
     assertThat(laboratory.logbook().instruments().all(laboratory.auditor()).get(0).status())

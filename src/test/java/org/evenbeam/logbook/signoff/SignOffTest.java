@@ -53,8 +53,7 @@ class SignOffTest {
         laboratory
             .logbook()
             .runs()
-            .start(
-                manager, new NewRun(BALANCE, PLAN, RunKind.AS_FOUND_LEFT_SO, Optional.empty()));
+            .start(manager, new NewRun(BALANCE, PLAN, RunKind.AS_FOUND_LEFT_SO, Optional.empty()));
     laboratory
         .logbook()
         .bench()
@@ -98,10 +97,7 @@ class SignOffTest {
     assertThat(state(run)).isEqualTo(RunState.RETURNED);
 
     laboratory.logbook().runs().takeUp(laboratory.technician(), run);
-    laboratory
-        .logbook()
-        .submissions()
-        .submit(laboratory.technician(), run, password(), false);
+    laboratory.logbook().submissions().submit(laboratory.technician(), run, password(), false);
     signOff().approve(laboratory.manager(), run, password(), "");
 
     assertThat(laboratory.logbook().runs().open(laboratory.auditor(), run).events()).hasSize(6);
@@ -111,10 +107,7 @@ class SignOffTest {
   @Test
   void approvingWhatDoesNotConformNeedsADecisionInWords() {
     long run = laboratory.measured("20.0021", "20.0022", "20.0020", "20.0021");
-    laboratory
-        .logbook()
-        .submissions()
-        .submit(laboratory.technician(), run, password(), false);
+    laboratory.logbook().submissions().submit(laboratory.technician(), run, password(), false);
 
     assertThatThrownBy(() -> signOff().approve(laboratory.manager(), run, password(), " "))
         .hasMessageContaining("sign-off-reason-needed");

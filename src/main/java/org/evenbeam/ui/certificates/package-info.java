@@ -1,0 +1,2 @@
+/** Certificates: their history, and looking at one. */
+package org.evenbeam.ui.certificates;

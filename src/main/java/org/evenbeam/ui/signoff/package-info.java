@@ -1,0 +1,2 @@
+/** The manager's queue: submitted runs to approve or return. */
+package org.evenbeam.ui.signoff;

@@ -1,0 +1,2 @@
+/** The audit trail, to read and to check. */
+package org.evenbeam.ui.trail;
