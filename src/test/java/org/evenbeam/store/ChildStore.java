@@ -37,6 +37,10 @@ final class ChildStore implements AutoCloseable {
     return says.readLine();
   }
 
+  long pid() {
+    return process.pid();
+  }
+
   /**
    * Kills it at once, as by {@code kill -9}, and returns what it had said by then; by its handle,
    * since the process itself would close its output unread.
