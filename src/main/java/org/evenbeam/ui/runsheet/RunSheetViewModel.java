@@ -101,12 +101,14 @@ public final class RunSheetViewModel {
 
   /** Makes another check point the one to measure; what is typed stays with its own. */
   public void select(String checkPoint) {
-    if (!selected.get().isEmpty()) {
-      typedElsewhere.put(selected.get(), typed.get());
-    }
+    typedElsewhere.put(selected.get(), typed.get());
     selected.set(checkPoint);
+    showSelected();
+  }
+
+  private void showSelected() {
     selecting = true;
-    typed.set(typedElsewhere.getOrDefault(checkPoint, ""));
+    typed.set(typedElsewhere.getOrDefault(selected.get(), ""));
     selecting = false;
     refresh();
     assessRisk();
@@ -246,18 +248,24 @@ public final class RunSheetViewModel {
   }
 
   private void show(SheetState read) {
+    boolean first = selected.get().isEmpty();
+    List<PointTab> readTabs =
+        read.sheet().checkPoints().stream().map(RunSheetViewModel::tab).toList();
+    if (first) {
+      selected.set(firstToDo(readTabs));
+    }
     state.set(read);
     readOnly.set(!read.isOpenTo(session));
     conditions.show(read.sheet().conditions());
-    tabs.setAll(read.sheet().checkPoints().stream().map(RunSheetViewModel::tab).toList());
-    if (selected.get().isEmpty()) {
-      select(firstToDo());
+    tabs.setAll(readTabs);
+    if (first) {
+      showSelected();
     } else {
       refresh();
     }
   }
 
-  private String firstToDo() {
+  private static String firstToDo(List<PointTab> tabs) {
     return tabs.stream()
         .filter(tab -> tab.counting() < tab.planned())
         .findFirst()

@@ -14,28 +14,33 @@ import org.evenbeam.ui.TestLaboratory;
 import org.evenbeam.ui.common.Background;
 import org.evenbeam.verification.Condition;
 import org.evenbeam.verification.Verdict;
-import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.AfterAll;
+import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 
 class RunSheetViewModelTest {
-  private TestLaboratory laboratory;
+  private static TestLaboratory laboratory;
   private Session technician;
   private long run;
   private RunSheetViewModel sheet;
 
+  @BeforeAll
+  static void openLaboratory() {
+    laboratory = new TestLaboratory();
+  }
+
+  @AfterAll
+  static void closeLaboratory() {
+    laboratory.close();
+  }
+
   @BeforeEach
   void open() {
-    laboratory = new TestLaboratory();
     technician = laboratory.technician();
     run = laboratory.newRun(technician);
     sheet = sheet(technician, Background.direct());
     sheet.load();
-  }
-
-  @AfterEach
-  void close() {
-    laboratory.close();
   }
 
   private RunSheetViewModel sheet(Session session, Background background) {
