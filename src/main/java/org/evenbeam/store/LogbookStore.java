@@ -27,6 +27,8 @@ import org.evenbeam.store.tables.PlanTable;
 import org.evenbeam.store.tables.RunTable;
 import org.evenbeam.store.tables.StandardTable;
 import org.evenbeam.store.tables.TrailTable;
+import org.slf4j.Logger;
+import org.slf4j.LoggerFactory;
 
 /** A laboratory's logbook, open: its transactions and its records. */
 public final class LogbookStore implements AutoCloseable {
@@ -35,6 +37,8 @@ public final class LogbookStore implements AutoCloseable {
    * background task must not close the logbook.
    */
   private static final String THROUGH_INTERRUPTS = "retry:";
+
+  private static final Logger LOG = LoggerFactory.getLogger(LogbookStore.class);
 
   private final StoreTransactions transactions;
   private final Closeable lock;
@@ -63,11 +67,15 @@ public final class LogbookStore implements AutoCloseable {
     LogbookFolder folder = LogbookFolder.at(laboratoryFolder);
     folder.requireUsable();
     FolderLock lock = FolderLock.take(folder);
+    boolean opened = false;
     try {
-      return open(folder, lock, onScreen, fileSystem);
-    } catch (RuntimeException failed) {
-      closeAfter(failed, lock);
-      throw failed;
+      LogbookStore store = open(folder, lock, onScreen, fileSystem);
+      opened = true;
+      return store;
+    } finally {
+      if (!opened) {
+        giveUp(lock);
+      }
     }
   }
 
@@ -164,11 +172,12 @@ public final class LogbookStore implements AutoCloseable {
     }
   }
 
-  private static void closeAfter(RuntimeException failed, FolderLock lock) {
+  /** The failure that is on its way says more than one of closing, which is only logged. */
+  private static void giveUp(FolderLock lock) {
     try {
       lock.close();
     } catch (IOException unclosed) {
-      failed.addSuppressed(unclosed);
+      LOG.warn("The folder's lock could not be closed after a failed opening", unclosed);
     }
   }
 
