@@ -42,9 +42,9 @@ final class DemonstrationLaboratory implements Demonstration {
   }
 
   @Override
-  public void openWindow() {
+  public int openWindow() {
     folder.prepare(fresh);
-    new Window(folder.path(), press, true).open();
+    return new Window(folder.path(), press, SignInHints.ofDemonstration()).open();
   }
 
   @Override

@@ -1,6 +1,7 @@
 package org.evenbeam.app;
 
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Locale;
 import org.evenbeam.certificate.TemplatePress;
 import org.evenbeam.cli.EvenbeamCommand;
@@ -17,6 +18,7 @@ public final class Main {
 
   /** Runs the command that the arguments name and ends with its exit status. */
   public static void main(String[] arguments) {
+    Logs.onlyWarnings();
     System.exit(commandLine().execute(arguments));
   }
 
@@ -28,7 +30,7 @@ public final class Main {
             (folder, fresh) ->
                 new DemonstrationLaboratory(
                     orElse(folder, folders.demonstration()), fresh, press()),
-            folder -> new Window(orElse(folder, folders.laboratory()), press(), false).open());
+            folder -> new Window(orElse(folder, folders.laboratory()), press(), List.of()).open());
     return EvenbeamCommand.of(parts, new Words(Locale.ENGLISH), new Figures(DecimalSign.POINT));
   }
 

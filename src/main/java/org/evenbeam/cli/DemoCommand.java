@@ -4,8 +4,6 @@ import java.io.PrintWriter;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.Callable;
-import org.evenbeam.logbook.LogbookException;
-import org.evenbeam.wording.Problems;
 import org.evenbeam.wording.Sentences;
 import org.evenbeam.wording.Words;
 import picocli.CommandLine.Command;
@@ -22,8 +20,6 @@ import picocli.CommandLine.Spec;
       "Without a display: imports its data, evaluates, writes its certificates and says where."
     })
 final class DemoCommand implements Callable<Integer> {
-  private static final int FAILED = 2;
-
   @Option(
       names = "--laboratory",
       paramLabel = "FOLDER",
@@ -42,37 +38,24 @@ final class DemoCommand implements Callable<Integer> {
   private final EvenbeamCommand.DemonstrationFactory factory;
   private final Words words;
   private final Sentences sentences;
-  private final Problems problems;
 
-  DemoCommand(
-      EvenbeamCommand.DemonstrationFactory factory,
-      Words words,
-      Sentences sentences,
-      Problems problems) {
+  DemoCommand(EvenbeamCommand.DemonstrationFactory factory, Words words, Sentences sentences) {
     this.factory = factory;
     this.words = words;
     this.sentences = sentences;
-    this.problems = problems;
   }
 
   @Override
   public Integer call() {
-    try {
-      run(factory.in(folder, fresh));
-      return 0;
-    } catch (LogbookException failed) {
-      PrintWriter errors = spec.commandLine().getErr();
-      errors.println(problems.sentence(failed.key(), failed.arguments()));
-      errors.flush();
-      return FAILED;
+    Demonstration demonstration = factory.in(folder, fresh);
+    if (!headless && demonstration.hasDisplay()) {
+      return demonstration.openWindow();
     }
+    writeCertificates(demonstration);
+    return 0;
   }
 
-  private void run(Demonstration demonstration) {
-    if (!headless && demonstration.hasDisplay()) {
-      demonstration.openWindow();
-      return;
-    }
+  private void writeCertificates(Demonstration demonstration) {
     PrintWriter out = spec.commandLine().getOut();
     String why = headless ? "demo.headless" : "demo.no-display";
     out.println(words.text(Words.Bundle.COMMAND, why));

@@ -20,8 +20,10 @@ public interface Demonstration {
   /** Whether there is a display to open a window on. */
   boolean hasDisplay();
 
-  /** Opens the window on the demonstration laboratory and returns when it is closed. */
-  void openWindow();
+  /**
+   * Opens the window on the demonstration laboratory; returns the exit status when it is closed.
+   */
+  int openWindow();
 
   /** Does the same job without a window: imports, evaluates and writes the certificates. */
   List<Written> writeCertificates();

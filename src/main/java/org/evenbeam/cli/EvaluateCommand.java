@@ -5,12 +5,10 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
-import org.evenbeam.logbook.files.BadInput;
 import org.evenbeam.logbook.files.CheckPointFiles;
 import org.evenbeam.verification.CheckPointEvaluation;
 import org.evenbeam.verification.CheckPointFindings;
 import org.evenbeam.verification.Verdict;
-import org.evenbeam.wording.Problems;
 import org.evenbeam.wording.Sentences;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
@@ -28,7 +26,6 @@ import picocli.CommandLine.Spec;
 final class EvaluateCommand implements Callable<Integer> {
   static final int ALL_CONFORM = 0;
   static final int NOT_ALL_CONFORM = 1;
-  static final int BAD_INPUT = 2;
 
   @Option(
       names = "--check-points",
@@ -51,28 +48,18 @@ final class EvaluateCommand implements Callable<Integer> {
 
   private final CheckPointFiles files;
   private final Sentences sentences;
-  private final Problems problems;
 
-  EvaluateCommand(CheckPointFiles files, Sentences sentences, Problems problems) {
+  EvaluateCommand(CheckPointFiles files, Sentences sentences) {
     this.files = files;
     this.sentences = sentences;
-    this.problems = problems;
   }
 
   @Override
   public Integer call() {
-    List<CheckPointFindings> found;
-    try {
-      found =
-          files.read(checkPoints, readings).stream()
-              .map(point -> CheckPointEvaluation.of(point.question(), point.readings()))
-              .toList();
-    } catch (BadInput bad) {
-      PrintWriter errors = spec.commandLine().getErr();
-      errors.println(problems.sentence(bad.key(), bad.arguments()));
-      errors.flush();
-      return BAD_INPUT;
-    }
+    List<CheckPointFindings> found =
+        files.read(checkPoints, readings).stream()
+            .map(point -> CheckPointEvaluation.of(point.question(), point.readings()))
+            .toList();
     print(found);
     boolean allConform =
         found.stream().allMatch(f -> f.verdict().equals(Optional.of(Verdict.CONFORMS)));

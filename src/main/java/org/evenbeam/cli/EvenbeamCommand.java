@@ -67,10 +67,10 @@ public final class EvenbeamCommand implements Callable<Integer> {
   /** The command line over those parts, speaking that language. */
   public static CommandLine of(Parts parts, Words words, Figures figures) {
     Sentences sentences = new Sentences(words, figures);
-    Problems problems = new Problems(words);
     CommandLine line = new CommandLine(new EvenbeamCommand(parts.window()));
-    line.addSubcommand(new EvaluateCommand(parts.files(), sentences, problems));
-    line.addSubcommand(new DemoCommand(parts.demonstration(), words, sentences, problems));
+    line.addSubcommand(new EvaluateCommand(parts.files(), sentences));
+    line.addSubcommand(new DemoCommand(parts.demonstration(), words, sentences));
+    line.setExecutionExceptionHandler(new Failure(new Problems(words)));
     return line;
   }
 

@@ -9,6 +9,8 @@ import org.evenbeam.store.rows.ColumnTypes;
 import org.evenbeam.store.rows.Failures;
 import org.h2.jdbcx.JdbcConnectionPool;
 import org.jdbi.v3.core.Jdbi;
+import org.slf4j.Logger;
+import org.slf4j.LoggerFactory;
 
 /**
  * An open database. Its owner's connection is opened first, without a write delay, and held for as
@@ -26,8 +28,8 @@ final class Database implements AutoCloseable {
   private static final String OWNERS_SETTINGS =
       ";WRITE_DELAY=0;DB_CLOSE_ON_EXIT=FALSE;TRACE_LEVEL_FILE=0";
   private static final String WRONG_PASSWORD = "28000";
+  private static final Logger LOG = LoggerFactory.getLogger(Database.class);
   private static final int MOST_CONNECTIONS = 16;
-  private static final int ANSWERS_WITHIN_SECONDS = 5;
 
   private final Connection owner;
   private final JdbcConnectionPool pool;
@@ -61,6 +63,7 @@ final class Database implements AutoCloseable {
   private static Database connect(
       String url, Passwords passwords, Failures failures, boolean isOld) {
     Connection owner = null;
+    boolean opened = false;
     try {
       owner = DriverManager.getConnection(url + OWNERS_SETTINGS, OWNER, passwords.owner());
       if (owner.isReadOnly()) {
@@ -74,15 +77,17 @@ final class Database implements AutoCloseable {
       addEverydayUser(owner, passwords);
       JdbcConnectionPool pool = JdbcConnectionPool.create(url, EVERYDAY, passwords.everyday());
       pool.setMaxConnections(MOST_CONNECTIONS);
-      return new Database(owner, pool);
+      Database database = new Database(owner, pool);
+      opened = true;
+      return database;
     } catch (SQLException refused) {
-      closeAfter(refused, owner);
       throw WRONG_PASSWORD.equals(refused.getSQLState())
           ? new Failures(passwords.file()).because(Reason.DAMAGED, refused)
           : failures.of(refused);
-    } catch (RuntimeException refused) {
-      closeAfter(refused, owner);
-      throw refused;
+    } finally {
+      if (!opened) {
+        abandon(owner);
+      }
     }
   }
 
@@ -98,10 +103,13 @@ final class Database implements AutoCloseable {
     }
   }
 
-  /** Whether it still answers; a database that could not write has closed itself. */
+  /**
+   * Whether it still answers the owner; a database that could not write has closed itself. The
+   * connection's own {@code isValid} says yes even then.
+   */
   boolean isAlive() {
-    try {
-      return owner.isValid(ANSWERS_WITHIN_SECONDS);
+    try (Statement statement = owner.createStatement()) {
+      return statement.execute("select number from chain_head");
     } catch (SQLException dead) {
       return false;
     }
@@ -122,14 +130,15 @@ final class Database implements AutoCloseable {
     }
   }
 
-  private static void closeAfter(Exception failure, Connection owner) {
+  /** The failure that is on its way says more than one of closing, which is only logged. */
+  private static void abandon(Connection owner) {
     if (owner == null) {
       return;
     }
     try {
       owner.close();
     } catch (SQLException unclosed) {
-      failure.addSuppressed(unclosed);
+      LOG.warn("A connection could not be closed after a failed opening", unclosed);
     }
   }
 }

@@ -81,7 +81,7 @@ final class DatabaseHolder implements AutoCloseable {
     try {
       database.close();
     } catch (SQLException dead) {
-      LOG.warn("The database had closed itself; it is opened again", dead);
+      LOG.warn("The database had closed itself and is opened again: {}", dead.getMessage());
     }
   }
 }

@@ -1,5 +1,6 @@
 package org.evenbeam.store;
 
+import java.io.Closeable;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -36,9 +37,13 @@ public final class LogbookStore implements AutoCloseable {
   private static final String THROUGH_INTERRUPTS = "retry:";
 
   private final StoreTransactions transactions;
+  private final Closeable lock;
+  private final Failures failures;
 
-  private LogbookStore(StoreTransactions transactions) {
+  private LogbookStore(StoreTransactions transactions, Closeable lock, Failures failures) {
     this.transactions = transactions;
+    this.lock = lock;
+    this.failures = failures;
   }
 
   /**
@@ -57,6 +62,17 @@ public final class LogbookStore implements AutoCloseable {
   static LogbookStore open(Path laboratoryFolder, BooleanSupplier onScreen, String fileSystem) {
     LogbookFolder folder = LogbookFolder.at(laboratoryFolder);
     folder.requireUsable();
+    FolderLock lock = FolderLock.take(folder);
+    try {
+      return open(folder, lock, onScreen, fileSystem);
+    } catch (RuntimeException failed) {
+      closeAfter(failed, lock);
+      throw failed;
+    }
+  }
+
+  private static LogbookStore open(
+      LogbookFolder folder, FolderLock lock, BooleanSupplier onScreen, String fileSystem) {
     if (!Files.exists(folder.database())) {
       create(folder, fileSystem);
     }
@@ -64,7 +80,8 @@ public final class LogbookStore implements AutoCloseable {
     Passwords passwords = Passwords.read(folder.passwords());
     String url = url(fileSystem, folder.database());
     Supplier<Database> opener = () -> Database.open(url, passwords, failures);
-    return holding(opener.get(), opener, onScreen, failures);
+    DatabaseHolder holder = new DatabaseHolder(opener.get(), opener, failures);
+    return new LogbookStore(new StoreTransactions(holder, onScreen, failures), lock, failures);
   }
 
   /** A logbook in memory, of its own, gone when it is closed; for tests. */
@@ -73,11 +90,13 @@ public final class LogbookStore implements AutoCloseable {
     Failures failures = new Failures(nowhere);
     String url = "jdbc:h2:mem:" + UUID.randomUUID();
     Passwords passwords = Passwords.random(nowhere);
-    return holding(
-        Database.create(url, passwords, failures),
-        () -> Database.open(url, passwords, failures),
-        onScreenThread,
-        failures);
+    DatabaseHolder holder =
+        new DatabaseHolder(
+            Database.create(url, passwords, failures),
+            () -> Database.open(url, passwords, failures),
+            failures);
+    return new LogbookStore(
+        new StoreTransactions(holder, onScreenThread, failures), () -> {}, failures);
   }
 
   /** Its transactions. */
@@ -138,16 +157,19 @@ public final class LogbookStore implements AutoCloseable {
   /** Closes the logbook, after the change at work, if any. */
   @Override
   public void close() {
-    transactions.close();
+    try (lock) {
+      transactions.close();
+    } catch (IOException failed) {
+      throw failures.of(failed);
+    }
   }
 
-  private static LogbookStore holding(
-      Database database,
-      Supplier<Database> again,
-      BooleanSupplier onScreenThread,
-      Failures failures) {
-    DatabaseHolder holder = new DatabaseHolder(database, again, failures);
-    return new LogbookStore(new StoreTransactions(holder, onScreenThread, failures));
+  private static void closeAfter(RuntimeException failed, FolderLock lock) {
+    try {
+      lock.close();
+    } catch (IOException unclosed) {
+      failed.addSuppressed(unclosed);
+    }
   }
 
   /** Makes the database under another name, so that a half-made one is never taken for one. */

@@ -26,7 +26,8 @@ final class Schema {
   }
 
   /**
-   * Brings the schema up to this program's.
+   * Brings the schema up to this program's. Nothing is written when it is there already, so that a
+   * database can be opened while the disk is full.
    *
    * @throws org.evenbeam.logbook.StoreFailed NEWER_SCHEMA, with nothing changed, when a migration
    *     was applied that this program does not know
@@ -34,7 +35,11 @@ final class Schema {
   void migrate() {
     try {
       requireKnown();
-      flyway.migrate();
+      if (flyway.info().pending().length > 0) {
+        flyway.migrate();
+      } else {
+        flyway.validate();
+      }
     } catch (FlywayException refused) {
       throw failures.of(refused);
     }

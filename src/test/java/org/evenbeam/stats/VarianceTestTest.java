@@ -41,12 +41,12 @@ class VarianceTestTest {
   }
 
   @Test
-  void theFloorRaisesOnlyUpperEnds() {
+  void theFloorRaisesOnlyTheOneSidedUpperBound() {
     StandardDeviationBounds bounds = StandardDeviationBounds.of(0.1, 10, 0.05);
     StandardDeviationBounds raised = bounds.raisedTo(0.45);
 
     assertThat(raised.upperBound()).isEqualTo(0.45);
-    assertThat(raised.interval()).isEqualTo(new Interval(bounds.interval().low(), 0.45));
+    assertThat(raised.interval()).isEqualTo(bounds.interval());
     assertThat(raised.lowerBound()).isEqualTo(bounds.lowerBound());
     assertThat(raised.raisedTo(0.2)).isEqualTo(raised);
     assertThat(VarianceTest.of(bounds, 0.4).shown()).isEqualTo(Shown.WITHIN);

@@ -39,7 +39,7 @@ class OpeningTest {
     makeLogbook();
     try (var files = Files.list(folder)) {
       assertThat(files.map(file -> file.getFileName().toString()))
-          .containsExactlyInAnyOrder(DATABASE, PASSWORDS);
+          .containsExactlyInAnyOrder(DATABASE, PASSWORDS, "logbook.lock");
     }
     assertThat(PosixFilePermissions.toString(Files.getPosixFilePermissions(file(PASSWORDS))))
         .isEqualTo("rw-------");

@@ -34,6 +34,17 @@ public record AcceptancePlan(int n, int acceptance) {
   }
 
   /**
+   * The failure rate at which the chance to pass has fallen to {@code missed}: Clopper and
+   * Pearson's upper bound for c failures.
+   *
+   * @param missed 1e-12 to 0.5
+   * @throws IllegalArgumentException if {@code missed} is outside its range
+   */
+  public double detectableRate(double missed) {
+    return new FailureCount(acceptance, n).bounds(missed).upperBound();
+  }
+
+  /**
    * The fewest trials with which c failures show, at level 1 - alpha, a rate within its limit;
    * absent where a million are too few.
    *

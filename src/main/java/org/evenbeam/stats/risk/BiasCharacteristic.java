@@ -1,30 +1,16 @@
 package org.evenbeam.stats.risk;
 
-import org.evenbeam.stats.Arguments;
+import org.evenbeam.stats.Interval;
 
 /** The chance of each verdict over the true bias, for one true standard deviation. */
-public final class BiasCharacteristic {
-  private final PassingChance conforms;
-  private final PassingChance notRejected;
-  private final double ownDeviation;
-  private final double reference;
-
-  BiasCharacteristic(
-      PassingChance conforms, PassingChance notRejected, double ownDeviation, double reference) {
-    this.conforms = conforms;
-    this.notRejected = notRejected;
-    this.ownDeviation = ownDeviation;
-    this.reference = reference;
-  }
-
+public sealed interface BiasCharacteristic permits ContinuousCharacteristic, RoundedCharacteristic {
   /**
-   * The chances over the reference's error.
+   * The chances over the reference's error and, for rounded readings, over where the true value
+   * lies between two digits.
    *
    * @throws IllegalArgumentException if {@code bias} is not finite
    */
-  public VerdictChances at(double bias) {
-    return chances(bias, Math.hypot(ownDeviation, reference));
-  }
+  VerdictChances at(double bias);
 
   /**
    * The chances once the error of the reference is given, for averages over an error that several
@@ -35,18 +21,16 @@ public final class BiasCharacteristic {
    *     reference that is too low makes the bias look larger, so it is added
    * @throws IllegalArgumentException if an argument is not finite
    */
-  public VerdictChances given(double bias, double referenceError) {
-    Arguments.finite("referenceError", referenceError);
-    return chances(bias + referenceError * reference, ownDeviation);
-  }
+  VerdictChances given(double bias, double referenceError);
+
+  /**
+   * The smallest and the largest chance of CONFORMS over where the true value lies between two
+   * digits; a single point where readings are not rounded.
+   *
+   * @throws IllegalArgumentException if {@code bias} is not finite
+   */
+  Interval conformsByPosition(double bias);
 
   /** The reference's standard uncertainty in units of the mean's own standard deviation. */
-  double referenceInOwn() {
-    return reference / ownDeviation;
-  }
-
-  private VerdictChances chances(double bias, double deviation) {
-    Arguments.finite("bias", bias);
-    return VerdictChances.ofNested(conforms.at(bias, deviation), notRejected.at(bias, deviation));
-  }
+  double referenceInOwn();
 }

@@ -6,8 +6,14 @@ import org.evenbeam.stats.Arguments;
 
 /**
  * What a check can see and what it can miss: the chance of each verdict for an instrument of a true
- * bias and a true standard deviation, the readings being normal. The error of the reference moves
- * the observed bias also where the plan leaves it out of the rule. Absolute error below 1e-10.
+ * bias and a true standard deviation. The error of the reference moves the observed bias also where
+ * the plan leaves it out of the rule.
+ *
+ * <p>The readings are taken as normal, and the chances are integrals with an absolute error below
+ * 1e-10; rounding to the resolution d adds its variance d^2 / 12 to theirs (Sheppard, Proc. London
+ * Math. Soc. 29 (1898) 353, doi:10.1112/plms/s1-29.1.353). Below a standard deviation of one
+ * resolution that no longer holds, and they are taken as rounded normal readings, averaged over
+ * where the true value lies between two digits.
  */
 public final class OperatingCharacteristic {
   private final CheckDesign design;
@@ -52,11 +58,20 @@ public final class OperatingCharacteristic {
    */
   public BiasCharacteristic atSigma(double sigma) {
     Arguments.positive("sigma", sigma);
+    double d = design.resolution();
+    return sigma < d ? roundedAt(sigma) : continuousAt(Math.hypot(sigma, d / Math.sqrt(12)));
+  }
+
+  BiasCharacteristic continuousAt(double sigma) {
     PassingChance conforms = chance(conforming, sigma);
     PassingChance remains = notRejected.equals(conforming) ? conforms : chance(notRejected, sigma);
     double ownDeviation = sigma / Math.sqrt(design.n());
     double reference = design.reference().standardUncertainty();
-    return new BiasCharacteristic(conforms, remains, ownDeviation, reference);
+    return new ContinuousCharacteristic(conforms, remains, ownDeviation, reference);
+  }
+
+  private BiasCharacteristic roundedAt(double sigma) {
+    return RoundedCharacteristic.of(design, conforming, notRejected, margin, sigma);
   }
 
   /** The curve over the bias at one standard deviation. */

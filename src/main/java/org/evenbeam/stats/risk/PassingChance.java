@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import org.evenbeam.stats.Interval;
-import org.evenbeam.stats.StandardNormal;
 
 /**
  * The chance that an instrument of one true standard deviation falls into a {@link PassingRegion},
@@ -23,56 +22,69 @@ final class PassingChance {
   private final double[] high;
   private final double[] weight;
 
-  private PassingChance(List<Weighted> points) {
-    this.low = points.stream().mapToDouble(Weighted::low).toArray();
-    this.high = points.stream().mapToDouble(Weighted::high).toArray();
-    this.weight = points.stream().mapToDouble(Weighted::weight).toArray();
+  private PassingChance(Points points) {
+    this.low = points.weighted.stream().mapToDouble(Weighted::low).toArray();
+    this.high = points.weighted.stream().mapToDouble(Weighted::high).toArray();
+    this.weight = points.weighted.stream().mapToDouble(Weighted::weight).toArray();
   }
 
-  /** The limits of the bias at one s, with the probability that the point stands for. */
+  /** The limits of the bias at one outcome of s, with the probability that it stands for. */
   private record Weighted(double low, double high, double weight) {}
+
+  /** Collects outcomes. */
+  static final class Points {
+    private final PassingRegion region;
+    private final List<Weighted> weighted = new ArrayList<>();
+
+    Points(PassingRegion region) {
+      this.region = region;
+    }
+
+    /**
+     * Adds an outcome, unless the guard band closes its limits.
+     *
+     * @param margin the guard band
+     * @param error what the outcome adds to the true bias
+     * @param weight its probability
+     */
+    void add(double margin, double error, double weight) {
+      double shift = region.guard() * margin;
+      double low = region.limits().low() - shift;
+      double high = region.limits().high() + shift;
+      if (low <= high && weight > 0) {
+        weighted.add(new Weighted(low - error, high - error, weight));
+      }
+    }
+
+    PassingChance toChance() {
+      return new PassingChance(this);
+    }
+  }
 
   /** Where the limits do not move with s: no integral is needed. */
   static PassingChance ofFixedLimits(PassingRegion region, double margin, double chanceOfSpread) {
-    List<Weighted> points = new ArrayList<>();
-    addPoint(points, region, margin, chanceOfSpread);
-    return new PassingChance(points);
+    Points points = new Points(region);
+    points.add(margin, 0, chanceOfSpread);
+    return points.toChance();
   }
 
   /** Where they move with s, for the true standard deviation {@code sigma}. */
   static PassingChance ofMovingLimits(
       PassingRegion region, BiasMargin margin, SpreadRatio ratio, int n, double sigma) {
-    List<Weighted> points = new ArrayList<>();
+    Points points = new Points(region);
     for (Interval panel : new Layout(region, margin, ratio, n, sigma).panels()) {
       for (Panels.Node node : Panels.nodes(panel, s -> ratio.density(s / sigma) / sigma)) {
-        addPoint(points, region, margin.at(node.at()), node.weight());
+        points.add(margin.at(node.at()), 0, node.weight());
       }
     }
-    return new PassingChance(points);
+    return points.toChance();
   }
 
-  private static void addPoint(
-      List<Weighted> points, PassingRegion region, double margin, double weight) {
-    double shift = region.guard() * margin;
-    double low = region.limits().low() - shift;
-    double high = region.limits().high() + shift;
-    if (low < high && weight > 0) {
-      points.add(new Weighted(low, high, weight));
-    }
-  }
-
-  /**
-   * The chance for a true bias.
-   *
-   * @param bias the true bias
-   * @param deviation the standard deviation of the observed bias about it, above zero
-   */
-  double at(double bias, double deviation) {
+  /** The chance for a true bias, which the given error moves. */
+  double at(double bias, ErrorOfMean error) {
     double sum = 0;
     for (int i = 0; i < weight.length; i++) {
-      double below = StandardNormal.lowerTail((low[i] - bias) / deviation);
-      double upTo = StandardNormal.lowerTail((high[i] - bias) / deviation);
-      sum += weight[i] * (upTo - below);
+      sum += weight[i] * (error.lowerTail(high[i] - bias) - error.lowerTail(low[i] - bias));
     }
     return sum;
   }

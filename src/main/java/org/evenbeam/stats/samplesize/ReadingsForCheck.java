@@ -1,11 +1,13 @@
 package org.evenbeam.stats.samplesize;
 
-import java.util.function.IntPredicate;
+import java.util.function.Predicate;
 import org.evenbeam.stats.Arguments;
-import org.evenbeam.stats.risk.BiasCriterion;
+import org.evenbeam.stats.BiasLimits;
+import org.evenbeam.stats.risk.BiasCharacteristic;
 import org.evenbeam.stats.risk.CheckDesign;
 import org.evenbeam.stats.risk.DetectableChange;
 import org.evenbeam.stats.risk.OperatingCharacteristic;
+import org.evenbeam.stats.risk.VerdictChances;
 
 /**
  * Readings needed for a check to find a fault and to pass a faultless instrument. Under guarded
@@ -51,7 +53,11 @@ public final class ReadingsForCheck {
     if (design.bias().isEmpty()) {
       throw new IllegalArgumentException("the design judges no bias");
     }
-    return search(n -> findsBias(n, bias, 1) && findsBias(n, bias, -1));
+    return search(
+        check -> {
+          BiasCharacteristic faultless = check.atSigma(sigma);
+          return passes(faultless.at(0)) && findsBias(faultless, bias);
+        });
   }
 
   /**
@@ -61,34 +67,30 @@ public final class ReadingsForCheck {
    */
   public ReadingsNeeded toFindStandardDeviation(double faulty) {
     Arguments.positive("faulty", faulty);
-    return search(n -> missesNoMore(n, 0, faulty));
+    return search(check -> passes(check.at(0, sigma)) && found(check.at(0, faulty)));
   }
 
-  private ReadingsNeeded search(IntPredicate findsFault) {
+  private ReadingsNeeded search(Predicate<OperatingCharacteristic> enough) {
     int fewest = design.establishedSigma().isPresent() ? 1 : 2;
     for (int n = fewest; n <= CAP; n++) {
-      if (chanceToPass(n, 0, sigma) >= wantedPass && findsFault.test(n)) {
+      if (enough.test(OperatingCharacteristic.of(design.withReadings(n)))) {
         return new ReadingsNeeded.Enough(n);
       }
     }
     return new ReadingsNeeded.NotUpTo(CAP);
   }
 
-  private boolean findsBias(int n, double bias, int side) {
-    boolean limited =
-        design
-            .bias()
-            .map(BiasCriterion::limits)
-            .filter(limits -> Double.isFinite(side > 0 ? limits.above() : limits.below()))
-            .isPresent();
-    return !limited || missesNoMore(n, side * bias, sigma);
+  private boolean findsBias(BiasCharacteristic check, double bias) {
+    BiasLimits limits = design.bias().orElseThrow().limits();
+    boolean above = Double.isInfinite(limits.above()) || found(check.at(bias));
+    return above && (Double.isInfinite(limits.below()) || found(check.at(-bias)));
   }
 
-  private boolean missesNoMore(int n, double bias, double trueSigma) {
-    return chanceToPass(n, bias, trueSigma) <= DetectableChange.MISSED;
+  private boolean passes(VerdictChances faultless) {
+    return faultless.conforms() >= wantedPass;
   }
 
-  private double chanceToPass(int n, double bias, double trueSigma) {
-    return OperatingCharacteristic.of(design.withReadings(n)).at(bias, trueSigma).conforms();
+  private static boolean found(VerdictChances faulty) {
+    return faulty.conforms() <= DetectableChange.MISSED;
   }
 }

@@ -5,6 +5,7 @@ import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.CompletionException;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
+import java.util.concurrent.TimeUnit;
 import java.util.function.Consumer;
 import java.util.function.Supplier;
 import javafx.application.Platform;
@@ -15,6 +16,8 @@ import org.evenbeam.logbook.LogbookException;
  */
 public final class ScreenBackground implements Background, AutoCloseable {
   private static final System.Logger LOGGER = System.getLogger(ScreenBackground.class.getName());
+
+  private static final long LONGEST_WORK_SECONDS = 60;
 
   private final ExecutorService worker =
       Executors.newSingleThreadExecutor(
@@ -53,9 +56,16 @@ public final class ScreenBackground implements Background, AutoCloseable {
     return thrown;
   }
 
-  /** Lets the work in hand finish and takes no more. */
+  /** Takes no more work and returns when the work in hand is finished. */
   @Override
   public void close() {
     worker.shutdown();
+    try {
+      boolean finished = worker.awaitTermination(LONGEST_WORK_SECONDS, TimeUnit.SECONDS);
+      LOGGER.log(
+          finished ? Level.DEBUG : Level.WARNING, "Work for the screen ended: {0}", finished);
+    } catch (InterruptedException stopped) {
+      Thread.currentThread().interrupt();
+    }
   }
 }

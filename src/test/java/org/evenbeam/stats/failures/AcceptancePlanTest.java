@@ -2,6 +2,7 @@ package org.evenbeam.stats.failures;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
+import static org.assertj.core.api.Assertions.within;
 
 import org.evenbeam.stats.Shown;
 import org.junit.jupiter.api.Test;
@@ -46,6 +47,14 @@ class AcceptancePlanTest {
         assertThat(smaller.passes(0.01) >= 0.95 && smaller.passes(0.08) <= 0.1).isFalse();
       }
     }
+  }
+
+  @Test
+  void atTheDetectableRateATenthPasses() {
+    AcceptancePlan plan = new AcceptancePlan(50, 2);
+
+    assertThat(plan.passes(plan.detectableRate(0.1))).isEqualTo(0.1, within(1e-12));
+    assertThat(new AcceptancePlan(3, 3).detectableRate(0.1)).isEqualTo(1.0);
   }
 
   @Test

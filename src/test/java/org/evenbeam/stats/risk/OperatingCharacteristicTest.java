@@ -71,7 +71,7 @@ class OperatingCharacteristicTest {
   void chancesAgreeWithAnIndependentIntegral(Row row) {
     CheckDesign design = design(row);
     VerdictChances chances =
-        OperatingCharacteristic.of(design).at(row.number("beta"), row.number("sigma"));
+        OperatingCharacteristic.of(design).continuousAt(row.number("sigma")).at(row.number("beta"));
     double conforms = hiddenByResolution(design) ? 0 : row.number("conforms");
 
     assertThat(chances.conforms()).isEqualTo(conforms, within(1e-11));
@@ -106,7 +106,7 @@ class OperatingCharacteristicTest {
   @MethodSource("integrals")
   void averagedOverTheReferenceTheConditionalChancesAreTheChances(Row row) {
     BiasCharacteristic characteristic =
-        OperatingCharacteristic.of(design(row)).atSigma(row.number("sigma"));
+        OperatingCharacteristic.of(design(row)).continuousAt(row.number("sigma"));
     double beta = row.number("beta");
     double step = 0.01;
     double conforms = 0;

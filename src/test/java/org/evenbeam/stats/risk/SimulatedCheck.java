@@ -2,6 +2,7 @@ package org.evenbeam.stats.risk;
 
 import java.util.Random;
 import org.evenbeam.stats.CombinedUncertainty;
+import org.evenbeam.stats.EqualReadingsBound;
 import org.evenbeam.stats.LimitTest;
 import org.evenbeam.stats.Shown;
 import org.evenbeam.stats.StandardDeviationBounds;
@@ -12,6 +13,7 @@ import org.evenbeam.stats.UncertaintyComponent;
 final class SimulatedCheck {
   private final CheckDesign design;
   private final double trials;
+  private EqualReadingsBound equal;
   private int conforming;
   private int rejected;
 
@@ -21,13 +23,20 @@ final class SimulatedCheck {
     Random random = new Random(seed);
     for (int i = 0; i < trials; i++) {
       double error = design.reference().standardUncertainty() * random.nextGaussian();
+      double position = design.resolution() * (random.nextDouble() - 0.5);
       double[] readings =
           random
               .doubles(design.n())
-              .map(u -> sigma * StandardNormal.quantileOfUpperTail(1 - u))
+              .map(u -> position + sigma * StandardNormal.quantileOfUpperTail(1 - u))
+              .map(this::rounded)
               .toArray();
-      judge(readings, bias + error);
+      judge(readings, bias + error - position);
     }
+  }
+
+  private double rounded(double reading) {
+    double d = design.resolution();
+    return d == 0 ? reading : d * Math.rint(reading / d);
   }
 
   double conforms() {
@@ -58,20 +67,37 @@ final class SimulatedCheck {
   private int biasVerdict(double observed, double s) {
     BiasCriterion criterion = design.bias().orElseThrow();
     CombinedUncertainty uncertainty =
-        CombinedUncertainty.of(
-            new UncertaintyComponent(s / Math.sqrt(design.n()), design.n() - 1),
-            design.reference());
+        CombinedUncertainty.of(repeatability(s / Math.sqrt(design.n())), design.reference());
     LimitTest test = LimitTest.of(observed, uncertainty, criterion.limits(), criterion.alpha());
     boolean within = criterion.limits().permitted().contains(observed);
     return verdict(criterion.rule(), test.shown(), within);
   }
 
+  private UncertaintyComponent repeatability(double ofMean) {
+    double floor = design.resolution() / Math.sqrt(12);
+    return ofMean > floor
+        ? new UncertaintyComponent(ofMean, design.n() - 1)
+        : UncertaintyComponent.known(floor);
+  }
+
   private int precisionVerdict(double s) {
     PrecisionCriterion criterion = design.precision().orElseThrow();
-    Shown shown =
-        StandardDeviationBounds.of(s, design.n(), criterion.alpha())
+    return verdict(criterion.rule(), precisionShown(s, criterion), s <= criterion.limit());
+  }
+
+  private Shown precisionShown(double s, PrecisionCriterion criterion) {
+    if (design.resolution() == 0) {
+      return StandardDeviationBounds.of(s, design.n(), criterion.alpha())
+          .shownAgainst(criterion.limit());
+    }
+    if (equal == null) {
+      equal = EqualReadingsBound.of(design.n(), design.resolution(), criterion.alpha());
+    }
+    return s == 0
+        ? equal.shownAgainst(criterion.limit())
+        : StandardDeviationBounds.of(s, design.n(), criterion.alpha())
+            .raisedTo(equal.upperBound())
             .shownAgainst(criterion.limit());
-    return verdict(criterion.rule(), shown, s <= criterion.limit());
   }
 
   /** 1 conforms, -1 does not, 0 undecided. */
