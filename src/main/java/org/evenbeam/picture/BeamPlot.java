@@ -75,7 +75,7 @@ public final class BeamPlot {
     posts(scale);
     shapes.addAll(
         new DotStacks(deviations, scale, question.resolution())
-            .shapes(text * 1.7, beamLabelBaseline() - text, text));
+            .shapes(text * 1.7, beamLabelBaseline() - text * 1.2, text));
     readingsOutside(scale);
     interval().ifPresent(interval -> beam(scale, interval));
     String words = labels.describe(new PictureContent.Beam(question, findings));

@@ -38,8 +38,6 @@ public final class BenchPane extends StackPane {
   private BorderPane content() {
     filter.setId("filter");
     filter.textProperty().bindBidirectional(model.filter());
-    filter.setPromptText(texts.text("bench.filter-prompt"));
-    filter.setAccessibleText(texts.text("bench.filter"));
     filter.setOnAction(event -> table.chooseSelected());
     filter.addEventFilter(KeyEvent.KEY_PRESSED, this::keyInFilter);
     VBox.setVgrow(table, Priority.ALWAYS);
@@ -50,13 +48,13 @@ public final class BenchPane extends StackPane {
             Panes.problem(model.problem()),
             new MyRuns(model, texts),
             Panes.label(texts.text("bench.instruments"), "heading"),
-            filter,
+            Panes.named(texts.text("bench.filter"), filter),
             table);
     ScrollPane right = new ScrollPane(new StartCard(model, texts, this::ask));
     right.setFitToWidth(true);
     right.setFitToHeight(true);
     right.setPrefWidth(300);
-    right.setMinWidth(280);
+    right.setMinWidth(270);
     BorderPane content = new BorderPane(left, null, right, null, null);
     BorderPane.setMargin(right, new Insets(0, 0, 0, 14));
     content.getStyleClass().add("screen");

@@ -1,21 +1,26 @@
 package org.evenbeam.ui.bench;
 
+import java.util.Comparator;
+import java.util.Optional;
 import java.util.function.Function;
 import javafx.beans.property.SimpleObjectProperty;
-import javafx.beans.property.SimpleStringProperty;
 import javafx.geometry.Pos;
+import javafx.scene.Node;
+import javafx.scene.control.Label;
 import javafx.scene.control.TableCell;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableView;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.HBox;
+import javafx.scene.layout.VBox;
 import org.evenbeam.logbook.instruments.InstrumentOverview;
 import org.evenbeam.picture.VerdictMark;
 import org.evenbeam.ui.common.Panes;
 import org.evenbeam.ui.common.PicturePane;
 import org.evenbeam.ui.common.ScreenTexts;
 import org.evenbeam.ui.common.StatusPill;
+import org.evenbeam.verification.Verdict;
 
 /** The instruments with status and next due date; Enter chooses one. */
 final class InstrumentTable extends TableView<InstrumentOverview> {
@@ -30,11 +35,10 @@ final class InstrumentTable extends TableView<InstrumentOverview> {
     setItems(model.instruments());
     setPlaceholder(Panes.label(texts.text("bench.none"), "quiet"));
     setColumnResizePolicy(CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN);
-    add("bench.tag", 80, one -> one.instrument().tag());
-    getColumns().add(status());
-    add("bench.kind", 150, one -> one.instrument().kind());
-    add("bench.location", 130, one -> one.instrument().location());
-    add("bench.next-due", 130, this::due);
+    getColumns().add(column("bench.instrument", 190, this::instrument));
+    getColumns().add(column("bench.status", 190, this::status));
+    getColumns().add(column("bench.location", 120, one -> words(one.instrument().location(), "")));
+    getColumns().add(column("bench.next-due", 110, this::due));
     addEventHandler(
         KeyEvent.KEY_PRESSED,
         event -> {
@@ -57,51 +61,65 @@ final class InstrumentTable extends TableView<InstrumentOverview> {
     }
   }
 
-  private String due(InstrumentOverview one) {
-    return one.nextDue()
-        .map(
-            day ->
-                model.isPastDue(one)
-                    ? texts.text("bench.past-due", texts.day(day))
-                    : texts.day(day))
-        .orElseGet(() -> texts.text("bench.never"));
+  private Cell instrument(InstrumentOverview one) {
+    return words(one.instrument().tag(), one.instrument().kind());
   }
 
-  private void add(String title, double width, Function<InstrumentOverview, String> text) {
-    TableColumn<InstrumentOverview, String> column = new TableColumn<>(texts.text(title));
-    column.setCellValueFactory(cell -> new SimpleStringProperty(text.apply(cell.getValue())));
-    column.setPrefWidth(width);
-    getColumns().add(column);
+  private Cell status(InstrumentOverview one) {
+    Optional<Verdict> shape = StatusPill.shape(one.status());
+    String word = texts.name("status", one.status());
+    Label label = Panes.label(word, StatusPill.style(shape));
+    label.setWrapText(true);
+    HBox status =
+        new HBox(8, PicturePane.fixed(VerdictMark.draw(shape, 11, texts.labels(""))), label);
+    status.setAlignment(Pos.CENTER_LEFT);
+    return new Cell(status, word);
   }
 
-  private TableColumn<InstrumentOverview, InstrumentOverview> status() {
+  private Cell due(InstrumentOverview one) {
+    String day = one.nextDue().map(texts::day).orElseGet(() -> texts.text("bench.never"));
+    return words(day, model.isPastDue(one) ? texts.text("bench.past-due") : "");
+  }
+
+  /** One line, and a smaller one below where there is something to say. */
+  private static Cell words(String first, String second) {
+    VBox lines = new VBox(2, Panes.label(first));
+    if (!second.isEmpty()) {
+      lines.getChildren().add(Panes.label(second, "quiet", "small"));
+    }
+    lines.setAlignment(Pos.CENTER_LEFT);
+    return new Cell(lines, second.isEmpty() ? first : first + ", " + second);
+  }
+
+  /** What a cell shows, and what a screen reader says. */
+  private record Cell(Node graphic, String words) {}
+
+  private TableColumn<InstrumentOverview, InstrumentOverview> column(
+      String title, double width, Function<InstrumentOverview, Cell> content) {
     TableColumn<InstrumentOverview, InstrumentOverview> column =
-        new TableColumn<>(texts.text("bench.status"));
+        new TableColumn<>(texts.text(title));
     column.setCellValueFactory(cell -> new SimpleObjectProperty<>(cell.getValue()));
-    column.setCellFactory(table -> new StatusCell());
-    column.setPrefWidth(170);
+    column.setCellFactory(table -> new GraphicCell(content));
+    column.setComparator(Comparator.comparing(one -> content.apply(one).words()));
+    column.setPrefWidth(width);
     return column;
   }
 
-  private final class StatusCell extends TableCell<InstrumentOverview, InstrumentOverview> {
+  private static final class GraphicCell extends TableCell<InstrumentOverview, InstrumentOverview> {
+    private final Function<InstrumentOverview, Cell> content;
+
+    GraphicCell(Function<InstrumentOverview, Cell> content) {
+      this.content = content;
+    }
+
     @Override
     protected void updateItem(InstrumentOverview one, boolean empty) {
       super.updateItem(one, empty);
       setText(null);
-      if (empty) {
-        setGraphic(null);
-        return;
-      }
-      String word = texts.name("status", one.status());
-      HBox status =
-          new HBox(
-              8,
-              PicturePane.fixed(
-                  VerdictMark.draw(StatusPill.shape(one.status()), 11, texts.labels(""))),
-              Panes.label(word, StatusPill.style(StatusPill.shape(one.status()))));
-      status.setAlignment(Pos.CENTER_LEFT);
-      setGraphic(status);
-      setAccessibleText(word);
+      Optional<Cell> cell =
+          empty || one == null ? Optional.empty() : Optional.of(content.apply(one));
+      setGraphic(cell.map(Cell::graphic).orElse(null));
+      setAccessibleText(cell.map(Cell::words).orElse(null));
     }
   }
 }

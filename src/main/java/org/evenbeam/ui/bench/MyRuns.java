@@ -68,6 +68,10 @@ final class MyRuns extends VBox {
   }
 
   private final class RunCell extends ListCell<RunSummary> {
+    RunCell() {
+      setPrefWidth(0);
+    }
+
     @Override
     protected void updateItem(RunSummary run, boolean empty) {
       super.updateItem(run, empty);

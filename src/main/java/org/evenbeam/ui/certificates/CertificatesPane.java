@@ -38,15 +38,13 @@ public final class CertificatesPane extends VBox {
     getStyleClass().add("screen");
     filter.setId("filter");
     filter.textProperty().bindBidirectional(model.filter());
-    filter.setPromptText(texts.text("certificates.filter-prompt"));
-    filter.setAccessibleText(texts.text("certificates.filter"));
     filter.setOnAction(event -> openSelected());
     prepareTable();
     getChildren()
         .addAll(
             Panes.label(texts.text("certificates.title"), "title"),
             Panes.problem(model.problem()),
-            filter,
+            Panes.named(texts.text("certificates.filter"), filter),
             table,
             bottom());
   }
@@ -63,7 +61,7 @@ public final class CertificatesPane extends VBox {
     table.setPlaceholder(Panes.label(texts.text("certificates.none"), "quiet"));
     table.setColumnResizePolicy(TableView.CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN);
     add("certificates.number", CertificateFacts::number);
-    add("bench.tag", CertificateFacts::instrumentTag);
+    add("certificates.tag", CertificateFacts::instrumentTag);
     add("certificates.performed", one -> texts.day(one.performed()));
     table.getColumns().add(verdict());
     add("certificates.issued", one -> texts.dayAndTime(one.issuedAt()));

@@ -91,7 +91,10 @@ public final class AskPane extends StackPane {
     Runnable confirm = () -> answered.accept(texts(fields), this::close);
     Button button = Panes.button(question.confirm(), confirm, "accent");
     button.setId("confirm");
-    fields.forEach(field -> field.setOnAction(event -> confirm.run()));
+    for (int i = 0; i < fields.size(); i++) {
+      Runnable next = i + 1 < fields.size() ? fields.get(i + 1)::requestFocus : confirm;
+      fields.get(i).setOnAction(event -> next.run());
+    }
     HBox buttons = new HBox(8, Panes.spring(), Panes.button(cancel, this::close), button);
     buttons.setAlignment(Pos.CENTER_RIGHT);
     card.getChildren().addAll(Panes.problem(problem), buttons);

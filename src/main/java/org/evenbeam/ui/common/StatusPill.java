@@ -19,7 +19,7 @@ public final class StatusPill extends HBox {
     getStyleClass().add("pill");
     setAlignment(Pos.CENTER_LEFT);
     setMinWidth(Region.USE_PREF_SIZE);
-    setMaxHeight(Region.USE_PREF_SIZE);
+    setMaxSize(Region.USE_PREF_SIZE, Region.USE_PREF_SIZE);
     setAccessibleRole(AccessibleRole.TEXT);
     setAccessibleText(word);
   }

@@ -18,7 +18,9 @@ final class ConditionsBar extends HBox {
     for (Condition condition : Condition.values()) {
       TextField field = new TextField();
       field.setId("condition-" + condition.name());
-      field.setPrefColumnCount(5);
+      field.setPrefWidth(92);
+      field.setMinWidth(56);
+      field.setPromptText(texts.name("condition.short", condition));
       field.textProperty().bindBidirectional(model.conditions().typed(condition));
       field.editableProperty().bind(model.readOnly().not());
       field.setAccessibleText(texts.name("condition", condition));

@@ -26,8 +26,8 @@ final class OutcomeCards extends VBox {
   private final RunSheetViewModel model;
   private final ScreenTexts texts;
   private final SheetWords words;
-  private final PicturePane beam = new PicturePane(300, 130);
-  private final PicturePane spread = new PicturePane(300, 66);
+  private final PicturePane beam = new PicturePane(220, 130);
+  private final PicturePane spread = new PicturePane(220, 66);
   private final Label readingLess = Panes.label("", "quiet", "small");
   private final Label spreadUnit = Panes.label("", "quiet", "small");
   private final VBox said = new VBox(8);
@@ -61,13 +61,14 @@ final class OutcomeCards extends VBox {
   }
 
   private ScrollPane words() {
-    said.getStyleClass().add("card");
+    said.getStyleClass().add("words");
+    said.setFillWidth(true);
     said.setId("findings");
     ScrollPane scroll = new ScrollPane(said);
     scroll.setFitToWidth(true);
-    scroll.setFitToHeight(true);
+    scroll.getStyleClass().add("boxed");
     scroll.setMinHeight(90);
-    scroll.setPrefHeight(185);
+    scroll.setPrefHeight(215);
     scroll.setAccessibleText(texts.text("sheet.findings"));
     return scroll;
   }

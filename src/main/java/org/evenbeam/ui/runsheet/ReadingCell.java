@@ -17,6 +17,7 @@ final class ReadingCell extends ListCell<ReadingLine> {
 
   ReadingCell(ScreenTexts texts) {
     this.texts = texts;
+    setPrefWidth(0);
   }
 
   @Override

@@ -57,7 +57,7 @@ public final class RunSheetPane extends StackPane {
             Panes.problem(model.problem()),
             Panes.problem(model.conditions().problem()));
     readings.setPrefWidth(330);
-    readings.setMinWidth(290);
+    readings.setMinWidth(240);
     OutcomeCards outcome = new OutcomeCards(model, texts);
     HBox.setHgrow(outcome, Priority.ALWAYS);
     HBox middle = new HBox(14, readings, outcome);

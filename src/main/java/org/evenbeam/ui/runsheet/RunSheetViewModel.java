@@ -1,5 +1,6 @@
 package org.evenbeam.ui.runsheet;
 
+import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -166,12 +167,12 @@ public final class RunSheetViewModel {
   /** A reading that could not be kept goes back into its field, so that nothing typed is lost. */
   private void giveBack(Pending taken, Throwable thrown) {
     pending.remove(taken);
-    fail(thrown);
     if (taken.checkPoint().equals(selected.get()) && typed.get().isEmpty()) {
       typed.set(taken.text());
     } else {
       typedElsewhere.putIfAbsent(taken.checkPoint(), taken.text());
     }
+    fail(thrown);
     refresh();
   }
 
@@ -324,6 +325,7 @@ public final class RunSheetViewModel {
     if (selecting || readOnly.get()) {
       return;
     }
+    problem.set("");
     scratch.keep(selected.get(), now);
     draw();
   }
@@ -351,6 +353,11 @@ public final class RunSheetViewModel {
   /** What the whole run shows. */
   public RunFindings runFindings() {
     return state.get().sheet().findings();
+  }
+
+  /** The day on which the instrument's next verification was due, where that is past. */
+  public Optional<LocalDate> pastDue() {
+    return state.get().instrument().nextDue().filter(day -> day.isBefore(session.today()));
   }
 
   /** Whether the run has a verdict now. */

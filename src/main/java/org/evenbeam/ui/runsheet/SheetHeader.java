@@ -17,7 +17,8 @@ final class SheetHeader extends VBox {
   private final Label instrument = Panes.label("", "quiet");
   private final Label run = Panes.label("", "quiet");
   private final Label standard = Panes.label("", "quiet");
-  private final HBox status = new HBox(8);
+  private final Label pastDue = Panes.label("", "past-due");
+  private final HBox status = new HBox(10);
 
   SheetHeader(RunSheetViewModel model, ScreenTexts texts) {
     super(4);
@@ -25,6 +26,12 @@ final class SheetHeader extends VBox {
     this.texts = texts;
     this.words = new SheetWords(texts);
     tag.setMinWidth(USE_PREF_SIZE);
+    instrument.setWrapText(true);
+    for (Label line : java.util.List.of(run, standard)) {
+      line.setWrapText(true);
+      line.setMinHeight(USE_PREF_SIZE);
+    }
+    pastDue.setMinWidth(USE_PREF_SIZE);
     HBox first = new HBox(16, tag, instrument, Panes.spring(), status);
     first.setAlignment(Pos.CENTER_LEFT);
     getChildren().addAll(first, run, standard);
@@ -43,6 +50,9 @@ final class SheetHeader extends VBox {
     if (!model.selected().get().isEmpty()) {
       standard.setText(words.standard(model.point()));
     }
-    status.getChildren().setAll(StatusPill.of(state.instrument().status(), texts));
+    pastDue.setText(
+        model.pastDue().map(day -> texts.text("sheet.past-due", texts.day(day))).orElse(""));
+    status.setAlignment(Pos.CENTER_RIGHT);
+    status.getChildren().setAll(pastDue, StatusPill.of(state.instrument().status(), texts));
   }
 }

@@ -69,6 +69,7 @@ public final class SignOffPane extends StackPane {
 
   private BorderPane content() {
     list.setId("queue");
+    list.getStyleClass().add("queue");
     list.setAccessibleText(texts.text("sign-off.queue"));
     list.setItems(model.queue());
     list.setCellFactory(view -> new RunCell());
@@ -86,8 +87,8 @@ public final class SignOffPane extends StackPane {
     VBox.setVgrow(list, Priority.ALWAYS);
     VBox left = new VBox(12, Panes.label(texts.text("sign-off.title"), "title"), list);
     left.getStyleClass().add("screen");
-    left.setPrefWidth(235);
-    left.setMinWidth(210);
+    left.setPrefWidth(225);
+    left.setMinWidth(190);
     HBox answers =
         new HBox(
             10, Panes.following(model.said(), "strong"), open, Panes.spring(), giveBack, approve);
@@ -118,14 +119,20 @@ public final class SignOffPane extends StackPane {
             texts.text(
                 reason ? "approve.explanation-reason" : "approve.explanation",
                 texts.sentences().verdict(model.chosen().get().verdict())),
-            List.of(
-                AskPane.Field.password(texts.text("password")),
-                AskPane.Field.text(texts.text(reason ? "approve.decision" : "approve.remark"))),
+            reason
+                ? List.of(
+                    AskPane.Field.text(texts.text("approve.decision")),
+                    AskPane.Field.password(texts.text("password")))
+                : List.of(AskPane.Field.password(texts.text("password"))),
             texts.text("approve.sign"));
     ask.ask(
         question,
         (answers, close) ->
-            model.approve(answers.get(0), answers.get(1), answered(close), this::refused));
+            model.approve(
+                answers.get(answers.size() - 1),
+                reason ? answers.get(0) : "",
+                answered(close),
+                this::refused));
   }
 
   private void askToReturn() {
@@ -164,6 +171,10 @@ public final class SignOffPane extends StackPane {
   }
 
   private final class RunCell extends ListCell<RunSummary> {
+    RunCell() {
+      setPrefWidth(0);
+    }
+
     @Override
     protected void updateItem(RunSummary run, boolean empty) {
       super.updateItem(run, empty);
