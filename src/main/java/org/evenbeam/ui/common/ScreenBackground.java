@@ -6,7 +6,6 @@ import java.util.concurrent.CompletionException;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.TimeUnit;
-import java.util.concurrent.TimeUnit;
 import java.util.function.Consumer;
 import java.util.function.Supplier;
 import javafx.application.Platform;
@@ -19,8 +18,6 @@ public final class ScreenBackground implements Background, AutoCloseable {
   private static final System.Logger LOGGER = System.getLogger(ScreenBackground.class.getName());
 
   private static final long LONGEST_WORK_SECONDS = 60;
-
-  private static final long LONGEST_CLOSING_SECONDS = 60;
 
   private final ExecutorService worker =
       Executors.newSingleThreadExecutor(
