@@ -9,6 +9,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Set;
 import java.util.TreeSet;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -60,8 +61,8 @@ class BundlesTest {
 
   @Test
   void everyRefusalHasItsSentenceAndEverySentenceItsRefusal() throws IOException {
-    TreeSet<String> thrown = inSources(REFUSAL);
-    TreeSet<String> worded =
+    Set<String> thrown = inSources(REFUSAL);
+    Set<String> worded =
         problems.keySet().stream()
             .filter(key -> Character.isLowerCase(key.charAt(0)))
             .collect(Collectors.toCollection(TreeSet::new));
@@ -71,7 +72,7 @@ class BundlesTest {
     assertThat(inSources(LITERAL)).containsAll(worded);
   }
 
-  private static TreeSet<String> inSources(Pattern pattern) throws IOException {
+  private static Set<String> inSources(Pattern pattern) throws IOException {
     TreeSet<String> found = new TreeSet<>();
     try (Stream<Path> files = Files.walk(SOURCES)) {
       for (Path file : files.filter(f -> f.toString().endsWith(".java")).toList()) {
