@@ -8,6 +8,7 @@ import java.nio.file.StandardCopyOption;
 import java.sql.SQLException;
 import java.util.UUID;
 import java.util.function.BooleanSupplier;
+import java.util.function.Consumer;
 import java.util.function.Supplier;
 import org.evenbeam.logbook.Transactions;
 import org.evenbeam.logbook.certificates.CertificateRecords;
@@ -42,11 +43,17 @@ public final class LogbookStore implements AutoCloseable {
 
   private final StoreTransactions transactions;
   private final Closeable lock;
+  private final Consumer<String> compaction;
   private final Failures failures;
 
-  private LogbookStore(StoreTransactions transactions, Closeable lock, Failures failures) {
+  private LogbookStore(
+      StoreTransactions transactions,
+      Closeable lock,
+      Consumer<String> compaction,
+      Failures failures) {
     this.transactions = transactions;
     this.lock = lock;
+    this.compaction = compaction;
     this.failures = failures;
   }
 
@@ -89,7 +96,11 @@ public final class LogbookStore implements AutoCloseable {
     String url = url(fileSystem, folder.database());
     Supplier<Database> opener = () -> Database.open(url, passwords, failures);
     DatabaseHolder holder = new DatabaseHolder(opener.get(), opener, failures);
-    return new LogbookStore(new StoreTransactions(holder, onScreen, failures), lock, failures);
+    return new LogbookStore(
+        new StoreTransactions(holder, onScreen, failures),
+        lock,
+        head -> Compaction.run(folder, passwords, head),
+        failures);
   }
 
   /** A logbook in memory, of its own, gone when it is closed; for tests. */
@@ -104,7 +115,7 @@ public final class LogbookStore implements AutoCloseable {
             () -> Database.open(url, passwords, failures),
             failures);
     return new LogbookStore(
-        new StoreTransactions(holder, onScreenThread, failures), () -> {}, failures);
+        new StoreTransactions(holder, onScreenThread, failures), () -> {}, head -> {}, failures);
   }
 
   /** Its transactions. */
@@ -162,11 +173,14 @@ public final class LogbookStore implements AutoCloseable {
     return new TrailTable();
   }
 
-  /** Closes the logbook, after the change at work, if any. */
+  /**
+   * Closes the logbook, after the change at work, if any. It takes a second or so where the file is
+   * mostly waste and is compacted.
+   */
   @Override
   public void close() {
     try (lock) {
-      transactions.close();
+      transactions.close().ifPresent(compaction);
     } catch (IOException failed) {
       throw failures.of(failed);
     }
