@@ -1,9 +1,7 @@
 package org.evenbeam.store;
 
-import java.sql.Connection;
-import java.sql.DriverManager;
 import java.sql.SQLException;
-import java.sql.Statement;
+import java.util.Optional;
 import org.evenbeam.logbook.StoreFailed.Reason;
 import org.evenbeam.store.rows.ColumnTypes;
 import org.evenbeam.store.rows.Failures;
@@ -13,29 +11,22 @@ import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 
 /**
- * An open database. Its owner's connection is opened first, without a write delay, and held for as
- * long as the database is open: the setting is in force only while it is given at opening. Every
- * use case works by the everyday user, who may read and add, and change only what is meant to
- * change.
+ * An open database. Every use case works by the everyday user, who may read and add, and change
+ * only what is meant to change.
  */
 final class Database implements AutoCloseable {
-  /** The user who owns tables and guards. */
-  static final String OWNER = "EVENBEAM_OWNER";
-
   /** The user by whom every use case works. */
   static final String EVERYDAY = "EVENBEAM_EVERYDAY";
 
-  private static final String OWNERS_SETTINGS =
-      ";WRITE_DELAY=0;DB_CLOSE_ON_EXIT=FALSE;TRACE_LEVEL_FILE=0";
   private static final String WRONG_PASSWORD = "28000";
   private static final Logger LOG = LoggerFactory.getLogger(Database.class);
   private static final int MOST_CONNECTIONS = 16;
 
-  private final Connection owner;
+  private final OwnersConnection owner;
   private final JdbcConnectionPool pool;
   private final Jdbi everyday;
 
-  private Database(Connection owner, JdbcConnectionPool pool) {
+  private Database(OwnersConnection owner, JdbcConnectionPool pool) {
     this.owner = owner;
     this.pool = pool;
     this.everyday = ColumnTypes.register(Jdbi.create(pool));
@@ -62,14 +53,14 @@ final class Database implements AutoCloseable {
 
   private static Database connect(
       String url, Passwords passwords, Failures failures, boolean isOld) {
-    Connection owner = null;
+    OwnersConnection owner = null;
     boolean opened = false;
     try {
-      owner = DriverManager.getConnection(url + OWNERS_SETTINGS, OWNER, passwords.owner());
+      owner = OwnersConnection.open(url, passwords);
       if (owner.isReadOnly()) {
         throw failures.because(Reason.READ_ONLY, new SQLException("opened read-only"));
       }
-      Schema schema = new Schema(url, OWNER, passwords.owner(), failures);
+      Schema schema = new Schema(url, OwnersConnection.USER, passwords.owner(), failures);
       if (isOld) {
         schema.requireLogbook();
       }
@@ -86,7 +77,7 @@ final class Database implements AutoCloseable {
           : failures.of(refused);
     } finally {
       if (!opened) {
-        abandon(owner);
+        closeAfterFailure(owner);
       }
     }
   }
@@ -98,9 +89,7 @@ final class Database implements AutoCloseable {
 
   /** Writes what was committed through to the disk. */
   void sync() throws SQLException {
-    try (Statement statement = owner.createStatement()) {
-      statement.execute("checkpoint sync");
-    }
+    owner.execute("checkpoint sync");
   }
 
   /**
@@ -108,30 +97,42 @@ final class Database implements AutoCloseable {
    * connection's own {@code isValid} says yes even then.
    */
   boolean isAlive() {
-    try (Statement statement = owner.createStatement()) {
-      return statement.execute("select number from chain_head");
+    try {
+      return !owner.head().isEmpty();
     } catch (SQLException dead) {
       return false;
     }
   }
 
-  /** Closes it; what was acknowledged is on the disk already. */
+  /** The hash in the chain's head, when the file is worth compacting once it is closed. */
+  Optional<String> headIfWasteful() throws SQLException {
+    return owner.isWasteful() ? Optional.of(owner.head()) : Optional.empty();
+  }
+
+  /** Closes it for everyone; what was acknowledged is on the disk already. */
   @Override
   public void close() throws SQLException {
+    pool.dispose();
+    try (owner) {
+      owner.shutDown();
+    }
+  }
+
+  /** Lets go of a database that has closed itself. */
+  void abandon() throws SQLException {
     pool.dispose();
     owner.close();
   }
 
-  private static void addEverydayUser(Connection owner, Passwords passwords) throws SQLException {
-    try (Statement statement = owner.createStatement()) {
-      statement.execute(
-          "create user if not exists " + EVERYDAY + " password '" + passwords.everyday() + "'");
-      statement.execute("grant everyday to " + EVERYDAY);
-    }
+  private static void addEverydayUser(OwnersConnection owner, Passwords passwords)
+      throws SQLException {
+    owner.execute(
+        "create user if not exists " + EVERYDAY + " password '" + passwords.everyday() + "'");
+    owner.execute("grant everyday to " + EVERYDAY);
   }
 
   /** The failure that is on its way says more than one of closing, which is only logged. */
-  private static void abandon(Connection owner) {
+  private static void closeAfterFailure(OwnersConnection owner) {
     if (owner == null) {
       return;
     }

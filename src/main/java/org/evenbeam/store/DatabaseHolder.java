@@ -1,6 +1,7 @@
 package org.evenbeam.store;
 
 import java.sql.SQLException;
+import java.util.Optional;
 import java.util.function.Supplier;
 import org.evenbeam.store.rows.Failures;
 import org.slf4j.Logger;
@@ -10,7 +11,7 @@ import org.slf4j.LoggerFactory;
  * Holds the open database. A database that could not write, as on a full disk, closes itself; it is
  * opened again when it is next asked for, so that a person frees some space and goes on.
  */
-final class DatabaseHolder implements AutoCloseable {
+final class DatabaseHolder {
   private static final Logger LOG = LoggerFactory.getLogger(DatabaseHolder.class);
 
   private final Supplier<Database> again;
@@ -64,14 +65,18 @@ final class DatabaseHolder implements AutoCloseable {
     }
   }
 
-  @Override
-  public synchronized void close() {
+  /**
+   * Closes the database, once.
+   *
+   * @return the hash in the chain's head, when the file is then worth compacting
+   */
+  synchronized Optional<String> close() {
     if (closed) {
-      return;
+      return Optional.empty();
     }
     closed = true;
-    try {
-      database.close();
+    try (Database closing = database) {
+      return closing.headIfWasteful();
     } catch (SQLException failed) {
       throw failures.of(failed);
     }
@@ -79,9 +84,10 @@ final class DatabaseHolder implements AutoCloseable {
 
   private void abandon() {
     try {
-      database.close();
+      database.abandon();
+      LOG.info("The database had closed itself and is opened again");
     } catch (SQLException dead) {
-      LOG.warn("The database had closed itself and is opened again: {}", dead.getMessage());
+      LOG.info("The database had closed itself and is opened again: {}", dead.getMessage());
     }
   }
 }

@@ -8,6 +8,7 @@ import java.nio.file.StandardCopyOption;
 import java.sql.SQLException;
 import java.util.UUID;
 import java.util.function.BooleanSupplier;
+import java.util.function.Consumer;
 import java.util.function.Supplier;
 import org.evenbeam.logbook.Transactions;
 import org.evenbeam.logbook.certificates.CertificateRecords;
@@ -27,6 +28,8 @@ import org.evenbeam.store.tables.PlanTable;
 import org.evenbeam.store.tables.RunTable;
 import org.evenbeam.store.tables.StandardTable;
 import org.evenbeam.store.tables.TrailTable;
+import org.slf4j.Logger;
+import org.slf4j.LoggerFactory;
 
 /** A laboratory's logbook, open: its transactions and its records. */
 public final class LogbookStore implements AutoCloseable {
@@ -36,13 +39,21 @@ public final class LogbookStore implements AutoCloseable {
    */
   private static final String THROUGH_INTERRUPTS = "retry:";
 
+  private static final Logger LOG = LoggerFactory.getLogger(LogbookStore.class);
+
   private final StoreTransactions transactions;
   private final Closeable lock;
+  private final Consumer<String> compaction;
   private final Failures failures;
 
-  private LogbookStore(StoreTransactions transactions, Closeable lock, Failures failures) {
+  private LogbookStore(
+      StoreTransactions transactions,
+      Closeable lock,
+      Consumer<String> compaction,
+      Failures failures) {
     this.transactions = transactions;
     this.lock = lock;
+    this.compaction = compaction;
     this.failures = failures;
   }
 
@@ -63,11 +74,15 @@ public final class LogbookStore implements AutoCloseable {
     LogbookFolder folder = LogbookFolder.at(laboratoryFolder);
     folder.requireUsable();
     FolderLock lock = FolderLock.take(folder);
+    boolean opened = false;
     try {
-      return open(folder, lock, onScreen, fileSystem);
-    } catch (RuntimeException failed) {
-      closeAfter(failed, lock);
-      throw failed;
+      LogbookStore store = open(folder, lock, onScreen, fileSystem);
+      opened = true;
+      return store;
+    } finally {
+      if (!opened) {
+        giveUp(lock);
+      }
     }
   }
 
@@ -81,7 +96,11 @@ public final class LogbookStore implements AutoCloseable {
     String url = url(fileSystem, folder.database());
     Supplier<Database> opener = () -> Database.open(url, passwords, failures);
     DatabaseHolder holder = new DatabaseHolder(opener.get(), opener, failures);
-    return new LogbookStore(new StoreTransactions(holder, onScreen, failures), lock, failures);
+    return new LogbookStore(
+        new StoreTransactions(holder, onScreen, failures),
+        lock,
+        head -> Compaction.run(folder, passwords, head),
+        failures);
   }
 
   /** A logbook in memory, of its own, gone when it is closed; for tests. */
@@ -96,7 +115,7 @@ public final class LogbookStore implements AutoCloseable {
             () -> Database.open(url, passwords, failures),
             failures);
     return new LogbookStore(
-        new StoreTransactions(holder, onScreenThread, failures), () -> {}, failures);
+        new StoreTransactions(holder, onScreenThread, failures), () -> {}, head -> {}, failures);
   }
 
   /** Its transactions. */
@@ -154,21 +173,25 @@ public final class LogbookStore implements AutoCloseable {
     return new TrailTable();
   }
 
-  /** Closes the logbook, after the change at work, if any. */
+  /**
+   * Closes the logbook, after the change at work, if any. It takes a second or so where the file is
+   * mostly waste and is compacted.
+   */
   @Override
   public void close() {
     try (lock) {
-      transactions.close();
+      transactions.close().ifPresent(compaction);
     } catch (IOException failed) {
       throw failures.of(failed);
     }
   }
 
-  private static void closeAfter(RuntimeException failed, FolderLock lock) {
+  /** The failure that is on its way says more than one of closing, which is only logged. */
+  private static void giveUp(FolderLock lock) {
     try {
       lock.close();
     } catch (IOException unclosed) {
-      failed.addSuppressed(unclosed);
+      LOG.warn("The folder's lock could not be closed after a failed opening", unclosed);
     }
   }
 

@@ -1,5 +1,6 @@
 package org.evenbeam.store;
 
+import java.util.Optional;
 import java.util.concurrent.locks.ReentrantLock;
 import java.util.function.BooleanSupplier;
 import java.util.function.Function;
@@ -21,7 +22,7 @@ import org.jdbi.v3.core.transaction.TransactionIsolationLevel;
  * Transactions on one database. Changes follow one another; reads go beside them, each on one view
  * of the data.
  */
-final class StoreTransactions implements Transactions, AutoCloseable {
+final class StoreTransactions implements Transactions {
   private final DatabaseHolder holder;
   private final BooleanSupplier onScreenThread;
   private final Failures failures;
@@ -73,11 +74,11 @@ final class StoreTransactions implements Transactions, AutoCloseable {
     }
   }
 
-  @Override
-  public void close() {
+  /** Closes the database, after the change at work, if any; see {@link DatabaseHolder#close}. */
+  Optional<String> close() {
     writing.lock();
     try {
-      holder.close();
+      return holder.close();
     } finally {
       writing.unlock();
     }

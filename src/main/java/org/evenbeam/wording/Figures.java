@@ -21,7 +21,7 @@ public final class Figures {
 
   private static final int UNCERTAINTY_DIGITS = 2;
   private static final int SIGNIFICANT_P_DIGITS = 2;
-  private static final double SMALLEST_P = 0.0001;
+  private static final BigDecimal SMALLEST_P = new BigDecimal("0.0001");
   private static final int LARGEST_PLAIN_EXPONENT = 7;
 
   private final DecimalSign sign;
@@ -77,8 +77,8 @@ public final class Figures {
 
   /** A probability: two significant digits, never 0 where it is only small. */
   public String probability(double p) {
-    return p < SMALLEST_P
-        ? "<" + UNIT_SPACE + dressed(BigDecimal.valueOf(SMALLEST_P).toPlainString())
+    return p < SMALLEST_P.doubleValue()
+        ? "<" + UNIT_SPACE + exact(SMALLEST_P)
         : significant(p, SIGNIFICANT_P_DIGITS);
   }
 

@@ -15,7 +15,7 @@ final class FolderStore {
   }
 
   Connection owner() throws SQLException {
-    return DriverManager.getConnection(url(), Database.OWNER, passwords().owner());
+    return DriverManager.getConnection(url(), OwnersConnection.USER, passwords().owner());
   }
 
   Connection everyday() throws SQLException {
