@@ -24,6 +24,8 @@ import org.evenbeam.verification.Verdict;
 
 /** The instruments with status and next due date; Enter chooses one. */
 final class InstrumentTable extends TableView<InstrumentOverview> {
+  private static final double ROW = 50;
+
   private final BenchViewModel model;
   private final ScreenTexts texts;
 
@@ -31,13 +33,13 @@ final class InstrumentTable extends TableView<InstrumentOverview> {
     this.model = model;
     this.texts = texts;
     setId("instruments");
+    setFixedCellSize(ROW);
     setAccessibleText(texts.text("bench.instruments"));
     setItems(model.instruments());
     setPlaceholder(Panes.label(texts.text("bench.none"), "quiet"));
     setColumnResizePolicy(CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN);
-    getColumns().add(column("bench.instrument", 190, this::instrument));
+    getColumns().add(column("bench.instrument", 230, this::instrument));
     getColumns().add(column("bench.status", 190, this::status));
-    getColumns().add(column("bench.location", 120, one -> words(one.instrument().location(), "")));
     getColumns().add(column("bench.next-due", 110, this::due));
     addEventHandler(
         KeyEvent.KEY_PRESSED,
@@ -62,7 +64,9 @@ final class InstrumentTable extends TableView<InstrumentOverview> {
   }
 
   private Cell instrument(InstrumentOverview one) {
-    return words(one.instrument().tag(), one.instrument().kind());
+    String kindAndPlace =
+        texts.text("bench.kind-and-place", one.instrument().kind(), one.instrument().location());
+    return words(one.instrument().tag(), kindAndPlace);
   }
 
   private Cell status(InstrumentOverview one) {

@@ -1,5 +1,6 @@
 package org.evenbeam.ui.common;
 
+import java.io.UncheckedIOException;
 import java.util.function.Consumer;
 import java.util.function.Supplier;
 import org.evenbeam.logbook.LogbookException;
@@ -15,6 +16,18 @@ public interface Background {
    */
   <T> void run(Supplier<T> work, Consumer<T> done, Consumer<Throwable> failed);
 
+  /**
+   * Computes something that needs nothing of the logbook, beside its work and in no order, so that
+   * no reading waits for it.
+   *
+   * @param work what to compute
+   * @param done takes its result
+   * @param failed takes what went wrong
+   */
+  default <T> void compute(Supplier<T> work, Consumer<T> done, Consumer<Throwable> failed) {
+    run(work, done, failed);
+  }
+
   /** Runs everything at once and where it was asked for, as tests like it. */
   static Background direct() {
     return new Background() {
@@ -23,7 +36,7 @@ public interface Background {
         T result;
         try {
           result = work.get();
-        } catch (LogbookException refused) {
+        } catch (LogbookException | UncheckedIOException refused) {
           failed.accept(refused);
           return;
         }

@@ -12,7 +12,8 @@ import javafx.application.Platform;
 import org.evenbeam.logbook.LogbookException;
 
 /**
- * One thread for the logbook's work, so that it keeps its order; results arrive on the screen's.
+ * One thread for the logbook's work, so that it keeps its order, and one for computing; results
+ * arrive on the screen's.
  */
 public final class ScreenBackground implements Background, AutoCloseable {
   private static final System.Logger LOGGER = System.getLogger(ScreenBackground.class.getName());
@@ -20,16 +21,30 @@ public final class ScreenBackground implements Background, AutoCloseable {
   private static final long LONGEST_WORK_SECONDS = 60;
 
   private final ExecutorService worker =
-      Executors.newSingleThreadExecutor(
-          work -> {
-            Thread thread = new Thread(work, "logbook work");
-            thread.setDaemon(false);
-            return thread;
-          });
+      Executors.newSingleThreadExecutor(work -> thread(work, "logbook work", false));
+
+  private final ExecutorService computer =
+      Executors.newSingleThreadExecutor(work -> thread(work, "computing", true));
+
+  private static Thread thread(Runnable work, String name, boolean daemon) {
+    Thread thread = new Thread(work, name);
+    thread.setDaemon(daemon);
+    return thread;
+  }
 
   @Override
   public <T> void run(Supplier<T> work, Consumer<T> done, Consumer<Throwable> failed) {
-    CompletableFuture<T> running = CompletableFuture.supplyAsync(work, worker);
+    run(worker, work, done, failed);
+  }
+
+  @Override
+  public <T> void compute(Supplier<T> work, Consumer<T> done, Consumer<Throwable> failed) {
+    run(computer, work, done, failed);
+  }
+
+  private static <T> void run(
+      ExecutorService where, Supplier<T> work, Consumer<T> done, Consumer<Throwable> failed) {
+    CompletableFuture<T> running = CompletableFuture.supplyAsync(work, where);
     var unused =
         running.whenComplete(
             (result, thrown) -> Platform.runLater(() -> deliver(result, thrown, done, failed)));
@@ -59,6 +74,7 @@ public final class ScreenBackground implements Background, AutoCloseable {
   /** Takes no more work and returns when the work in hand is finished. */
   @Override
   public void close() {
+    computer.shutdownNow();
     worker.shutdown();
     try {
       boolean finished = worker.awaitTermination(LONGEST_WORK_SECONDS, TimeUnit.SECONDS);

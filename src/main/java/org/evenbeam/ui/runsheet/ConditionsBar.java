@@ -18,7 +18,7 @@ final class ConditionsBar extends HBox {
     for (Condition condition : Condition.values()) {
       TextField field = new TextField();
       field.setId("condition-" + condition.name());
-      field.setPrefWidth(92);
+      field.setPrefWidth(106);
       field.setMinWidth(56);
       field.setPromptText(texts.name("condition.short", condition));
       field.textProperty().bindBidirectional(model.conditions().typed(condition));

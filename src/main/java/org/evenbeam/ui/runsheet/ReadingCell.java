@@ -39,7 +39,7 @@ final class ReadingCell extends ListCell<ReadingLine> {
 
   private static VBox graphic(ReadingLine line) {
     Label position = Panes.label(Integer.toString(line.position()), "quiet", "small");
-    position.setMinWidth(30);
+    position.setMinWidth(22);
     Label reading = Panes.label(line.text(), "reading");
     if (line.isGone()) {
       reading.getStyleClass().add("gone");
@@ -47,7 +47,7 @@ final class ReadingCell extends ListCell<ReadingLine> {
     reading.setMinWidth(Region.USE_PREF_SIZE);
     Label time = Panes.label(line.time(), "quiet", "small");
     time.setMinWidth(62);
-    HBox row = new HBox(12, position, Panes.spring(), reading, time, mark(line));
+    HBox row = new HBox(8, position, Panes.spring(), reading, time, mark(line));
     row.setAlignment(Pos.CENTER_LEFT);
     VBox lines = new VBox(row);
     if (!line.remark().isEmpty()) {

@@ -32,6 +32,7 @@ final class ReadingsCard extends VBox {
     Label hint = Panes.label("", "quiet", "small");
     hint.textProperty().bind(bound(() -> hint(model)));
     hint.setWrapText(true);
+    hint.setMinHeight(USE_PREF_SIZE);
     field.visibleProperty().bind(model.readOnly().not());
     field.managedProperty().bind(field.visibleProperty());
     field.setId("reading");

@@ -57,8 +57,9 @@ public final class RunSheetPane extends StackPane {
             Panes.problem(model.problem()),
             Panes.problem(model.conditions().problem()));
     readings.setPrefWidth(330);
-    readings.setMinWidth(240);
+    readings.setMinWidth(286);
     OutcomeCards outcome = new OutcomeCards(model, texts);
+    outcome.setPrefWidth(420);
     HBox.setHgrow(outcome, Priority.ALWAYS);
     HBox middle = new HBox(14, readings, outcome);
     BorderPane content = new BorderPane(middle, top, null, bottom(), null);

@@ -307,7 +307,7 @@ public final class RunSheetViewModel {
     OptionalDouble s =
         point.findings().map(f -> f.standardDeviation()).orElse(OptionalDouble.empty());
     risks.clear();
-    background.run(
+    background.compute(
         () -> CheckRisk.of(point.question(), point.planned().readings(), s),
         risk -> {
           if (point.planned().label().equals(selected.get())) {

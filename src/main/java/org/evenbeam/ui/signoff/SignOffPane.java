@@ -6,8 +6,11 @@ import java.util.function.LongFunction;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
+import javafx.scene.control.Label;
 import javafx.scene.control.ListCell;
 import javafx.scene.control.ListView;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
@@ -58,8 +61,17 @@ public final class SignOffPane extends StackPane {
     open.managedProperty().bind(open.visibleProperty());
     ask = new AskPane(content(), texts.text("cancel"));
     getChildren().add(ask);
+    addEventFilter(KeyEvent.KEY_PRESSED, this::keyAnywhere);
     model.chosen().addListener((chosen, before, now) -> show(now));
     show(model.chosen().get());
+  }
+
+  private void keyAnywhere(KeyEvent event) {
+    boolean approves = event.isShortcutDown() && event.getCode() == KeyCode.ENTER;
+    if (approves && approve.isVisible() && !ask.isAsking()) {
+      askToApprove();
+      event.consume();
+    }
   }
 
   /** Puts the cursor on the queue. */
@@ -73,7 +85,7 @@ public final class SignOffPane extends StackPane {
     list.setAccessibleText(texts.text("sign-off.queue"));
     list.setItems(model.queue());
     list.setCellFactory(view -> new RunCell());
-    javafx.scene.control.Label none = Panes.label(texts.text("sign-off.empty"), "quiet");
+    Label none = Panes.label(texts.text("sign-off.empty"), "quiet");
     none.setWrapText(true);
     list.setPlaceholder(none);
     list.getSelectionModel()
@@ -89,9 +101,17 @@ public final class SignOffPane extends StackPane {
     left.getStyleClass().add("screen");
     left.setPrefWidth(225);
     left.setMinWidth(190);
+    Label hint = Panes.label(texts.text("approve.hint"), "quiet", "small");
+    hint.visibleProperty().bind(approve.visibleProperty());
     HBox answers =
         new HBox(
-            10, Panes.following(model.said(), "strong"), open, Panes.spring(), giveBack, approve);
+            10,
+            Panes.following(model.said(), "strong"),
+            open,
+            Panes.spring(),
+            hint,
+            giveBack,
+            approve);
     answers.setAlignment(Pos.CENTER_LEFT);
     VBox bottom = new VBox(8, Panes.problem(model.problem()), answers);
     bottom.getStyleClass().add("answers");
