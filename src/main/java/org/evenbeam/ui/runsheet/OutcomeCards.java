@@ -98,7 +98,10 @@ final class OutcomeCards extends VBox {
     }
     said.getChildren().clear();
     Optional<Verdict> verdict = model.point().findings().flatMap(found -> found.verdict());
-    verdict.ifPresent(v -> said.getChildren().add(StatusPill.of(Optional.of(v), texts)));
+    boolean hindered = !model.state().get().sheet().obstacles().isEmpty();
+    verdict
+        .map(found -> StatusPill.of(hindered ? Optional.empty() : verdict, texts))
+        .ifPresent(said.getChildren()::add);
     model.findings().forEach(sentence -> say(sentence, "strong"));
     model.notes().forEach(sentence -> say(sentence, "ink"));
     model.risks().forEach(sentence -> say(sentence, "quiet"));

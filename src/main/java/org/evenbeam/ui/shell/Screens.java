@@ -4,7 +4,10 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalLong;
 import javafx.application.Platform;
+import javafx.event.EventTarget;
 import javafx.scene.Node;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.Region;
 import org.evenbeam.logbook.Session;
@@ -44,6 +47,24 @@ final class Screens extends BorderPane {
     this.surroundings = surroundings;
     this.foot = foot;
     buildNavigation();
+    addEventFilter(KeyEvent.KEY_PRESSED, this::passOn);
+  }
+
+  /** Ctrl+Enter is meant for the screen also while the navigation has the focus. */
+  private void passOn(KeyEvent event) {
+    boolean signs = event.isShortcutDown() && event.getCode() == KeyCode.ENTER;
+    if (signs && isInNavigation(event.getTarget())) {
+      getCenter().fireEvent(event.copyFor(getCenter(), getCenter()));
+      event.consume();
+    }
+  }
+
+  private boolean isInNavigation(EventTarget target) {
+    Node node = target instanceof Node found ? found : null;
+    while (node != null && node != navigation) {
+      node = node.getParent();
+    }
+    return node != null;
   }
 
   /** Begins where this person's work is. */
