@@ -143,7 +143,7 @@ public final class ExactSample {
       throw new IllegalArgumentException(name + " is absent");
     }
     long leading = (long) value.precision() - value.scale();
-    if (leading > LARGEST_EXPONENT || Math.abs((long) value.scale()) > LARGEST_EXPONENT) {
+    if (leading > LARGEST_EXPONENT || value.scale() > LARGEST_EXPONENT) {
       throw new IllegalArgumentException(
           name + " has its digits outside 1e-150 to 1e150, which no instrument reads");
     }

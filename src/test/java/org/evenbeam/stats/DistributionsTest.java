@@ -1,6 +1,7 @@
 package org.evenbeam.stats;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 import static org.evenbeam.stats.Close.assertClose;
 
 import java.util.List;
@@ -47,6 +48,13 @@ class DistributionsTest {
     double t = row.number("t");
     assertTail(Student.of(row.number("df")).lowerTail(t), row.number("lower_mp"));
     assertTail(Student.of(row.number("df")).upperTail(t), row.number("upper_mp"));
+  }
+
+  /** With one degree of freedom the tail is 1/2 - atan(t) / pi. */
+  @ParameterizedTest
+  @ValueSource(doubles = {1e-9, 1e-6, 1e-3, 0.004999, 0.005001, -0.004999})
+  void studentNearZeroKeepsItsDigits(double t) {
+    assertThat(Student.of(1).upperTail(t)).isEqualTo(0.5 - Math.atan(t) / Math.PI, within(1e-14));
   }
 
   @ParameterizedTest

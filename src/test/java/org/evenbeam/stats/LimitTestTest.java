@@ -70,6 +70,19 @@ class LimitTestTest {
   }
 
   @Test
+  void aBoundOnTheLimitDoesNotClearIt() {
+    CombinedUncertainty u = new CombinedUncertainty(0.25, 7);
+    double bound = LimitTest.of(3, u, BiasLimits.onlyAbove(1), 0.05).interval().low();
+
+    assertThat(LimitTest.of(3, u, BiasLimits.onlyAbove(bound), 0.05).shown())
+        .isEqualTo(Shown.NEITHER);
+    assertThat(LimitTest.of(-3, u, BiasLimits.onlyBelow(bound), 0.05).shown())
+        .isEqualTo(Shown.NEITHER);
+    assertThat(LimitTest.of(3, u, BiasLimits.onlyAbove(Math.nextDown(bound)), 0.05).shown())
+        .isEqualTo(Shown.BEYOND);
+  }
+
+  @Test
   void aSideWithoutLimitAsksNothing() {
     LimitTest test = LimitTest.of(5, new CombinedUncertainty(1, 4), BiasLimits.onlyAbove(7), 0.05);
 

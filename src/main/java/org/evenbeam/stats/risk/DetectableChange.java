@@ -50,13 +50,11 @@ public final class DetectableChange {
     if (curve.at(0).conforms() <= MISSED) {
       return OptionalDouble.of(0);
     }
+    // Above a tenth at zero, the chance falls through it once: it has one maximum over the bias.
     double limit = limitOn(side);
-    // The chance falls away from the middle of the limits, which may lie on this side of zero.
-    double middle = Math.max(0, (limit - limitOn(-side)) / 2);
-    double from = Double.isFinite(middle) ? middle : 0;
     return Double.isInfinite(limit)
         ? OptionalDouble.empty()
-        : fallen(size -> curve.at(side * size).conforms(), from, Math.max(limit, sigma));
+        : fallen(size -> curve.at(side * size).conforms(), 0, Math.max(limit, sigma));
   }
 
   private double limitOn(int side) {

@@ -13,6 +13,9 @@ final class DigitCounts {
   private static final double TOO_RARE = 1e-10;
   private static final int WIDENINGS = 8;
 
+  /** Steps of work at one position that are still quick. */
+  private static final double MOST_WORK = 4e7;
+
   private final int n;
   private final int largestSum;
   private final int largestSquares;
@@ -44,12 +47,26 @@ final class DigitCounts {
     return counts;
   }
 
+  /**
+   * Whether the table is made quickly; the work grows with the square of the number of readings.
+   */
+  static boolean affordable(int n, double sigma) {
+    double[] sides = sides(n, sigma, 0.5, 1);
+    return 2 * sides[0] * sides[1] * n * digits(sigma, 0.5).length <= MOST_WORK;
+  }
+
   /** A table that reaches about eight standard deviations beyond the means. */
   private static DigitCounts reaching(int n, double sigma, double position, double width) {
+    double[] sides = sides(n, sigma, position, width);
+    return new DigitCounts(n, (int) Math.ceil(sides[0]), (int) Math.ceil(sides[1]));
+  }
+
+  /** The largest sum and the largest sum of squares. */
+  private static double[] sides(int n, double sigma, double position, double width) {
     double square = sigma * sigma + position * position + 1.0 / 12;
     double sums = Math.abs(position) * n + width * 8 * Math.sqrt(n * square) + 2;
     double squares = n * square + width * 8 * (Math.sqrt(2.0 * n) * square + square) + 4;
-    return new DigitCounts(n, (int) Math.ceil(sums), (int) Math.ceil(squares));
+    return new double[] {sums, squares};
   }
 
   /** The chances of the digits -reach to reach. */

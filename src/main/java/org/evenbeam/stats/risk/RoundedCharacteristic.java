@@ -8,9 +8,10 @@ import org.evenbeam.stats.Interval;
 /**
  * The chances where readings are coarse, sigma being below the resolution: mean and standard
  * deviation then take few values and depend on each other and on where the true value lies between
- * two digits. Their joint distribution is exact up to 50 readings. For more, mean and standard
- * deviation are taken as independent again, with the moments of one rounded reading at each
- * position.
+ * two digits. Their joint distribution is exact up to about 50 readings, and more where sigma is
+ * small. For still more, mean and standard deviation are taken as independent again, with the
+ * moments of one rounded reading at each position; the chances are then within 0.005 for the bias
+ * and 0.03 for the precision.
  *
  * <p>The average is taken at 32 positions, a true value being equally likely anywhere between two
  * digits; each stands for the step about it. Against ten times as many the chances differ by less
@@ -22,8 +23,6 @@ final class RoundedCharacteristic implements BiasCharacteristic {
 
   /** Below it, in units of the resolution, the chances change within a thirty-second of a digit. */
   private static final double STEADY = 0.2;
-
-  private static final int MOST_EXACT = 50;
 
   private final List<Position> positions;
   private final double reference;
@@ -59,10 +58,10 @@ final class RoundedCharacteristic implements BiasCharacteristic {
         new RoundedPositions(design, conforming, notRejected, margin, relative);
     int count = relative < STEADY ? POSITIONS_OF_STEADY : POSITIONS;
     List<Position> positions = new ArrayList<>();
+    boolean exact = DigitCounts.affordable(design.n(), relative);
     for (int i = 0; i < count / 2; i++) {
       double position = (i + 0.5) / count;
-      positions.addAll(
-          design.n() <= MOST_EXACT ? source.exact(position) : source.byMoments(position));
+      positions.addAll(exact ? source.exact(position) : source.byMoments(position));
     }
     double step = design.resolution() / count;
     return new RoundedCharacteristic(positions, design.reference().standardUncertainty(), step);
