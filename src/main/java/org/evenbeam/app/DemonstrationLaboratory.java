@@ -53,7 +53,6 @@ final class DemonstrationLaboratory implements Demonstration {
     try (OpenLaboratory laboratory = OpenLaboratory.in(folder.path(), press, () -> false)) {
       OpenLogbook logbook = laboratory.logbook();
       Session session = signIn(logbook);
-      logbook.certificates().printPending(session);
       return write(logbook.certificates(), session);
     }
   }

@@ -1,6 +1,7 @@
 package org.evenbeam.app;
 
 import java.nio.file.Path;
+import java.time.Clock;
 import java.util.function.BooleanSupplier;
 import org.evenbeam.logbook.certificates.CertificatePress;
 import org.evenbeam.logbook.open.OpenLogbook;
@@ -24,7 +25,8 @@ final class OpenLaboratory implements AutoCloseable {
    */
   static OpenLaboratory in(Path folder, CertificatePress press, BooleanSupplier onScreenThread) {
     LogbookStore store = LogbookStore.open(folder, onScreenThread);
-    return new OpenLaboratory(store, Wiring.over(store, press, Passwords.Cost.USUAL));
+    return new OpenLaboratory(
+        store, Wiring.over(store, press, Passwords.Cost.USUAL, Clock.systemUTC()));
   }
 
   /** Its use cases. */

@@ -53,12 +53,14 @@ final class Window {
     Logs.into(folder);
     try (OpenLaboratory open =
             OpenLaboratory.in(folder, press, () -> Platform.isFxApplicationThread());
+        PendingPrints prints = new PendingPrints(open.logbook().certificates());
         ScreenBackground background = new ScreenBackground()) {
       Laboratory laboratory =
           open.logbook()
               .laboratory()
               .find()
               .orElseThrow(() -> new NotFound(NotFound.Thing.LABORATORY, folder.toString()));
+      prints.begin();
       show(open, laboratory, background);
       return 0;
     }

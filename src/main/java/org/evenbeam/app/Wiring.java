@@ -1,6 +1,7 @@
 package org.evenbeam.app;
 
 import java.security.SecureRandom;
+import java.time.Clock;
 import org.evenbeam.logbook.Desk;
 import org.evenbeam.logbook.Transactions;
 import org.evenbeam.logbook.certificates.CertificatePress;
@@ -29,8 +30,10 @@ public final class Wiring {
    *
    * @param press prints certificates
    * @param cost what a guess at a password costs
+   * @param clock by which the program dates its own work
    */
-  public static OpenLogbook over(LogbookStore store, CertificatePress press, Passwords.Cost cost) {
+  public static OpenLogbook over(
+      LogbookStore store, CertificatePress press, Passwords.Cost cost, Clock clock) {
     Transactions transactions = store.transactions();
     Desk desk = new Desk(transactions);
     People people =
@@ -59,7 +62,8 @@ public final class Wiring {
             new Certificates.Sources(
                 store.runs(), sheets, store.people(), store.laboratory(), store.trail()),
             press,
-            ProgramVersion.text()),
+            ProgramVersion.text(),
+            clock),
         new TrailReading(desk, store.trail()));
   }
 }

@@ -1,15 +1,11 @@
 package org.evenbeam.cli;
 
 import com.fasterxml.jackson.core.JsonProcessingException;
-import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.JsonNodeFactory;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.UncheckedIOException;
-import java.math.BigDecimal;
-import java.math.MathContext;
-import java.math.RoundingMode;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -35,7 +31,6 @@ import org.evenbeam.wording.Sentences;
 final class FindingsJson {
   private static final ObjectMapper MAPPER = new ObjectMapper();
   private static final JsonNodeFactory NODES = JsonNodeFactory.instance;
-  private static final MathContext FULL = new MathContext(17, RoundingMode.HALF_EVEN);
 
   private final Sentences sentences;
 
@@ -58,14 +53,19 @@ final class FindingsJson {
     ObjectNode node = NODES.objectNode();
     node.put("check_point", found.question().label());
     node.put("n", found.n());
-    put(node, "mean", found.mean());
-    put(node, "standard_deviation", found.standardDeviation());
-    put(node, "bias", found.bias());
+    JsonNumbers.put(node, "mean", found.mean());
+    JsonNumbers.put(node, "standard_deviation", found.standardDeviation());
+    JsonNumbers.put(node, "bias", found.bias());
     node.set("t_test", tTest(found));
     node.set("bias_limit", biasLimit(found.biasFinding()));
     node.set("variance_test", varianceTest(found));
+    FitnessJson.put(node, found.fitness());
+    node.set("risk", RiskJson.of(found));
     putVerdict(node, "verdict", found.verdict());
     ArrayNode notes = node.putArray("notes");
+    if (found.fitness().tooCoarse()) {
+      notes.add(sentences.notAskedTooCoarse());
+    }
     found.notes().forEach(note -> notes.add(sentences.notes().sentence(note, "")));
     boolean infinite =
         found
@@ -82,9 +82,9 @@ final class FindingsJson {
   private static ObjectNode tTest(CheckPointFindings found) {
     Optional<StudentTTest> test = found.tTest();
     ObjectNode node = NODES.objectNode();
-    put(node, "statistic", test.map(StudentTTest::statistic));
+    JsonNumbers.put(node, "statistic", test.map(StudentTTest::statistic));
     putDegrees(node, "degrees_of_freedom", found.n());
-    put(node, "p_two_sided", test.map(StudentTTest::pTwoSided));
+    JsonNumbers.put(node, "p_two_sided", test.map(StudentTTest::pTwoSided));
     put(node, test.map(StudentTTest::interval));
     return node;
   }
@@ -92,16 +92,16 @@ final class FindingsJson {
   private static ObjectNode biasLimit(BiasFinding finding) {
     Optional<LimitTest> test = finding.test();
     ObjectNode node = NODES.objectNode();
-    put(
+    JsonNumbers.put(
         node,
         "standard_uncertainty",
         finding.uncertainty().map(CombinedUncertainty::standardUncertainty));
-    put(
+    JsonNumbers.put(
         node,
         "effective_degrees_of_freedom",
         finding.uncertainty().map(CombinedUncertainty::degreesOfFreedom));
-    put(node, "p_lower", test.map(LimitTest::pLower));
-    put(node, "p_upper", test.map(LimitTest::pUpper));
+    JsonNumbers.put(node, "p_lower", test.map(LimitTest::pLower));
+    JsonNumbers.put(node, "p_upper", test.map(LimitTest::pUpper));
     put(node, finding.interval());
     putShown(node, finding.shown());
     putVerdict(node, "outcome", finding.outcome());
@@ -112,45 +112,27 @@ final class FindingsJson {
     PrecisionFinding finding = found.precisionFinding();
     Optional<VarianceTest> test = finding.test();
     ObjectNode node = NODES.objectNode();
-    put(node, "statistic", test.map(VarianceTest::statistic));
+    JsonNumbers.put(node, "statistic", test.map(VarianceTest::statistic));
     putDegrees(node, "degrees_of_freedom", found.n());
-    put(node, "p_lower", test.map(VarianceTest::pLower));
-    put(node, "p_upper", test.map(VarianceTest::pUpper));
-    put(node, "p_two_sided", test.map(VarianceTest::pTwoSided));
+    JsonNumbers.put(node, "p_lower", test.map(VarianceTest::pLower));
+    JsonNumbers.put(node, "p_upper", test.map(VarianceTest::pUpper));
+    JsonNumbers.put(node, "p_two_sided", test.map(VarianceTest::pTwoSided));
     put(node, finding.bounds().map(StandardDeviationBounds::interval));
-    put(node, "upper_bound", finding.upperBound());
-    put(node, "lower_bound", finding.lowerBound());
+    JsonNumbers.put(node, "upper_bound", finding.upperBound());
+    JsonNumbers.put(node, "lower_bound", finding.lowerBound());
     putShown(node, finding.shown());
     putVerdict(node, "outcome", finding.outcome());
     return node;
   }
 
   private static void put(ObjectNode node, Optional<Interval> interval) {
-    put(node, "interval_low", interval.map(Interval::low));
-    put(node, "interval_high", interval.map(Interval::high));
+    JsonNumbers.put(node, "interval_low", interval.map(Interval::low));
+    JsonNumbers.put(node, "interval_high", interval.map(Interval::high));
   }
 
   /** One reading has no degrees of freedom. */
   private static void putDegrees(ObjectNode node, String name, int n) {
-    put(node, name, n > 1 ? OptionalDouble.of(n - 1) : OptionalDouble.empty());
-  }
-
-  private static void put(ObjectNode node, String name, OptionalDouble value) {
-    put(node, name, value.isPresent() ? Optional.of(value.getAsDouble()) : Optional.empty());
-  }
-
-  private static void put(ObjectNode node, String name, double value) {
-    put(node, name, Optional.of(value));
-  }
-
-  private static void put(ObjectNode node, String name, Optional<Double> value) {
-    node.set(
-        name,
-        value
-            .filter(Double::isFinite)
-            .map(v -> new BigDecimal(v).round(FULL))
-            .<JsonNode>map(NODES::numberNode)
-            .orElseGet(NODES::nullNode));
+    JsonNumbers.put(node, name, n > 1 ? OptionalDouble.of(n - 1) : OptionalDouble.empty());
   }
 
   private static void putShown(ObjectNode node, Optional<Shown> shown) {

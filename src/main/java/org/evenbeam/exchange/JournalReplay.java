@@ -56,7 +56,7 @@ final class JournalReplay {
           logbook.signOff().giveBack(session, run(row), password.toCharArray(), row.text("reason"));
       case TAKE_UP -> logbook.runs().takeUp(session, run(row));
       case ABANDON -> logbook.runs().abandon(session, run(row), row.text("reason"));
-      case ISSUE -> logbook.certificates().issue(session, run(row));
+      case ISSUE -> logbook.certificates().issueRecord(session, run(row));
       case EVENT -> event(row, session);
       case STOP -> logbook.instruments().stop(session, row.text("instrument"), row.text("reason"));
       case RELEASE ->

@@ -1,5 +1,6 @@
 package org.evenbeam.logbook;
 
+import java.time.Instant;
 import java.util.Optional;
 import java.util.function.Function;
 
@@ -51,6 +52,16 @@ public final class Desk {
   public <T> T scratch(Session session, UseCase useCase, Function<Transaction, T> work) {
     require(session, useCase);
     return transactions.scratch(work);
+  }
+
+  /** Reads what the program needs for work of its own, which nobody has to ask for. */
+  public <T> T readByItself(Function<Transaction, T> work) {
+    return transactions.read(work);
+  }
+
+  /** Changes something by the program itself, with one trail entry that names no person. */
+  public <T> T changeByItself(Instant at, UseCase useCase, Function<Transaction, T> work) {
+    return transactions.change(new Change(at, Optional.empty(), useCase, Optional.empty()), work);
   }
 
   private static void require(Session session, UseCase useCase) {

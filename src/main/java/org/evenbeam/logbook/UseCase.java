@@ -65,8 +65,8 @@ public enum UseCase {
   RETURN_RUN("run returned", MANAGER),
   /** Write the certificate record of an approved run. */
   ISSUE_CERTIFICATE("certificate issued", MANAGER),
-  /** Keep the bytes of an issued certificate. */
-  KEEP_CERTIFICATE_DOCUMENT("certificate document kept", MANAGER),
+  /** Keep the bytes of an issued certificate; done by the program itself. */
+  KEEP_CERTIFICATE_DOCUMENT("certificate document kept"),
   /** Read certificates and their history. */
   READ_CERTIFICATES("certificates read", TECHNICIAN, MANAGER, AUDITOR),
   /** Read the audit trail and check its chain. */

@@ -29,6 +29,8 @@ public final class CheckPointEvaluation {
     noteSample(question, sample, notes);
     BiasFinding bias = BiasCriterion.judge(question, sample, notes);
     PrecisionFinding precision = PrecisionCriterion.judge(question, sample, notes);
+    Fitness fitness = Fitness.of(sample, question.resolution());
+    fitness.noteFlags(notes);
     return new CheckPointFindings(
         question,
         sample.n(),
@@ -38,6 +40,7 @@ public final class CheckPointEvaluation {
         tTest(question, sample),
         bias,
         precision,
+        fitness,
         verdict(question, sample.n(), bias, precision),
         notes);
   }

@@ -17,6 +17,7 @@ import org.evenbeam.stats.StudentTTest;
  *     readings
  * @param biasFinding the bias criterion
  * @param precisionFinding the precision criterion
+ * @param fitness whether the readings are fit for the tests made on them
  * @param verdict the worst outcome; empty where nothing was asked, something is missing or readings
  *     are still to come
  * @param notes what a reader must know beside the figures
@@ -30,6 +31,7 @@ public record CheckPointFindings(
     Optional<StudentTTest> tTest,
     BiasFinding biasFinding,
     PrecisionFinding precisionFinding,
+    Fitness fitness,
     Optional<Verdict> verdict,
     List<Note> notes) {
   /** Keeps the notes unchangeable. */

@@ -3,6 +3,7 @@ package org.evenbeam.verification;
 import java.math.BigDecimal;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.DoubleStream;
 import org.evenbeam.stats.BiasLimits;
 import org.evenbeam.stats.UncertaintyComponent;
 import org.evenbeam.stats.risk.BiasCriterion;
@@ -18,6 +19,11 @@ import org.evenbeam.stats.risk.PrecisionCriterion;
  * @param readings the number of readings it holds for
  * @param assumedStandardDeviation the assumed true standard deviation
  * @param origin where the assumption comes from
+ * @param conformsAtZeroBias the chance that the bias criterion alone conforms without bias; empty
+ *     where not asked
+ * @param conformsAtLimit likewise at a bias of its upper limit, or its lower one where there is
+ *     only that
+ * @param conformsAtTwiceLimit likewise at twice that limit
  * @param detectableBias the smallest bias that passes the bias criterion at most one time in ten;
  *     empty where not asked or never found
  * @param detectableStandardDeviation likewise for the precision criterion
@@ -28,6 +34,9 @@ public record CheckRisk(
     int readings,
     double assumedStandardDeviation,
     Origin origin,
+    OptionalDouble conformsAtZeroBias,
+    OptionalDouble conformsAtLimit,
+    OptionalDouble conformsAtTwiceLimit,
     OptionalDouble detectableBias,
     OptionalDouble detectableStandardDeviation,
     double conformsWithoutBias) {
@@ -63,18 +72,47 @@ public record CheckRisk(
     }
     double sigma = assumption.get().standardDeviation();
     CheckDesign design = design(question, readings);
+    OptionalDouble limit = limit(criteria);
     return Optional.of(
         new CheckRisk(
             readings,
             sigma,
             assumption.get().origin(),
+            conforms(design, sigma, limit, 0),
+            conforms(design, sigma, limit, 1),
+            conforms(design, sigma, limit, 2),
             criteria.asksBias()
-                ? detectable(design.biasAlone()).biasAbove(sigma)
+                ? smaller(
+                    detectable(design.biasAlone()).biasAbove(sigma),
+                    detectable(design.biasAlone()).biasBelow(sigma))
                 : OptionalDouble.empty(),
             criteria.asksPrecision()
                 ? detectable(design.precisionAlone()).standardDeviation(0)
                 : OptionalDouble.empty(),
             OperatingCharacteristic.of(design).at(0, sigma).conforms()));
+  }
+
+  /** The limit on the upper side, or that on the lower where there is no other, with its sign. */
+  private static OptionalDouble limit(Criteria criteria) {
+    return criteria
+        .biasAbove()
+        .or(() -> criteria.biasBelow().map(BigDecimal::negate))
+        .map(limit -> OptionalDouble.of(limit.doubleValue()))
+        .orElse(OptionalDouble.empty());
+  }
+
+  private static OptionalDouble conforms(
+      CheckDesign design, double sigma, OptionalDouble limit, int times) {
+    return limit.isEmpty()
+        ? OptionalDouble.empty()
+        : OptionalDouble.of(
+            OperatingCharacteristic.of(design.biasAlone())
+                .at(times * limit.getAsDouble(), sigma)
+                .conforms());
+  }
+
+  private static OptionalDouble smaller(OptionalDouble one, OptionalDouble other) {
+    return DoubleStream.concat(one.stream(), other.stream()).min();
   }
 
   private static DetectableChange detectable(CheckDesign design) {

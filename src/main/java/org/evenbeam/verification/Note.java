@@ -55,6 +55,21 @@ public sealed interface Note {
    */
   record UncertaintyLargeForSimpleAcceptance(double expanded, double third) implements Note {}
 
+  /** The readings do not look normal (Shapiro–Wilk), at that p. */
+  record NotNormal(double p) implements Note {}
+
+  /** One reading lies far from the others (Grubbs), so many standard deviations from the mean. */
+  record FarReading(int position, double standardDeviations) implements Note {}
+
+  /** Readings that follow one another are alike (von Neumann), at that p. */
+  record NeighboursAlike(double p) implements Note {}
+
+  /** The readings climb in the order in which they were made, at that p. */
+  record Climbing(double p) implements Note {}
+
+  /** The readings fall in the order in which they were made, at that p. */
+  record Falling(double p) implements Note {}
+
   /** Readings are still to come before there can be a verdict. */
   record ReadingsToGo(int n, int planned) implements Note {}
 

@@ -40,6 +40,18 @@ public final class Notes {
       return texts(beyond.n());
     } else if (note instanceof Note.UncertaintyLargeForSimpleAcceptance large) {
       return new String[] {amount(large.expanded(), unit), amount(large.third(), unit)};
+    } else if (note instanceof Note.NotNormal flag) {
+      return new String[] {figures.probability(flag.p())};
+    } else if (note instanceof Note.NeighboursAlike flag) {
+      return new String[] {figures.probability(flag.p())};
+    } else if (note instanceof Note.Climbing flag) {
+      return new String[] {figures.probability(flag.p())};
+    } else if (note instanceof Note.Falling flag) {
+      return new String[] {figures.probability(flag.p())};
+    } else if (note instanceof Note.FarReading far) {
+      return new String[] {
+        Integer.toString(far.position()), figures.toPlaces(far.standardDeviations(), 1)
+      };
     } else if (note instanceof Note.ReadingsToGo toGo) {
       return texts(toGo.planned() - toGo.n(), toGo.planned());
     } else if (note instanceof Note.MoreReadingsThanPlanned more) {

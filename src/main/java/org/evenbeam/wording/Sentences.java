@@ -47,6 +47,11 @@ public final class Sentences {
     return words.text(FINDING, "infinite-degrees-of-freedom");
   }
 
+  /** That normality and outliers are not asked of readings so coarse. */
+  public String notAskedTooCoarse() {
+    return words.text(FINDING, "not-asked-too-coarse");
+  }
+
   /** The name of a decision rule. */
   public String rule(DecisionRule rule) {
     return words.name(FINDING, "rule", rule);

@@ -2,37 +2,24 @@ package org.evenbeam.ui;
 
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
-import java.security.SecureRandom;
 import java.time.Clock;
 import java.time.Duration;
 import java.time.Instant;
 import java.time.ZoneId;
 import java.time.ZoneOffset;
+import java.util.Optional;
 import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.BooleanSupplier;
+import org.evenbeam.app.Wiring;
 import org.evenbeam.exchange.LaboratoryImport;
-import org.evenbeam.logbook.Desk;
 import org.evenbeam.logbook.Session;
-import org.evenbeam.logbook.Transactions;
 import org.evenbeam.logbook.certificates.CertificatePress;
 import org.evenbeam.logbook.certificates.CertificateRecord;
-import org.evenbeam.logbook.certificates.Certificates;
-import org.evenbeam.logbook.history.TrailReading;
-import org.evenbeam.logbook.instruments.Instruments;
 import org.evenbeam.logbook.laboratory.Laboratory;
-import org.evenbeam.logbook.laboratory.LaboratorySetUp;
 import org.evenbeam.logbook.open.OpenLogbook;
 import org.evenbeam.logbook.people.Passwords;
-import org.evenbeam.logbook.people.People;
-import org.evenbeam.logbook.plans.Plans;
-import org.evenbeam.logbook.run.Bench;
 import org.evenbeam.logbook.run.NewRun;
 import org.evenbeam.logbook.run.RunKind;
-import org.evenbeam.logbook.run.Runs;
-import org.evenbeam.logbook.run.SheetReader;
-import org.evenbeam.logbook.run.Submissions;
-import org.evenbeam.logbook.signoff.SignOff;
-import org.evenbeam.logbook.standards.Standards;
 import org.evenbeam.store.LogbookStore;
 import org.evenbeam.ui.common.ScreenTexts;
 
@@ -59,7 +46,7 @@ public final class TestLaboratory implements AutoCloseable {
   /** Opens it; the store refuses a thread for which the given one says so. */
   public TestLaboratory(BooleanSupplier onScreenThread) {
     this.store = LogbookStore.openInMemory(onScreenThread);
-    this.logbook = useCases(store);
+    this.logbook = Wiring.over(store, new NumberPress(), CHEAP, clock);
     new LaboratoryImport(Path.of("demo-data")).into(logbook);
   }
 
@@ -108,47 +95,12 @@ public final class TestLaboratory implements AutoCloseable {
     String plan = logbook.plans().current(session, "BAL-01").get(0).title();
     return logbook
         .runs()
-        .start(
-            session,
-            new NewRun("BAL-01", plan, RunKind.AS_FOUND_LEFT_SO, java.util.Optional.empty()));
+        .start(session, new NewRun("BAL-01", plan, RunKind.AS_FOUND_LEFT_SO, Optional.empty()));
   }
 
   @Override
   public void close() {
     store.close();
-  }
-
-  private static OpenLogbook useCases(LogbookStore store) {
-    Transactions transactions = store.transactions();
-    Desk desk = new Desk(transactions);
-    People people =
-        new People(transactions, desk, store.people(), new Passwords(new SecureRandom(), CHEAP));
-    SheetReader sheets =
-        new SheetReader(
-            store.runs(),
-            store.instruments(),
-            store.standards(),
-            store.plans(),
-            store.people(),
-            store.laboratory());
-    return new OpenLogbook(
-        new LaboratorySetUp(transactions, desk, store.laboratory(), store.people(), people),
-        people,
-        new Instruments(desk, store.instruments()),
-        new Standards(desk, store.standards()),
-        new Plans(desk, store.plans(), store.instruments(), store.standards()),
-        new Runs(desk, store.runs(), store.instruments(), store.standards(), store.plans(), sheets),
-        new Bench(desk, store.runs(), sheets),
-        new Submissions(desk, store.runs(), store.instruments(), sheets, people),
-        new SignOff(desk, store.runs(), sheets, people),
-        new Certificates(
-            desk,
-            store.certificates(),
-            new Certificates.Sources(
-                store.runs(), sheets, store.people(), store.laboratory(), store.trail()),
-            new NumberPress(),
-            "test"),
-        new TrailReading(desk, store.trail()));
   }
 
   /** Prints no more than the certificate's number. */

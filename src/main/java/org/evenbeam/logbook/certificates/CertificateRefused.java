@@ -3,7 +3,7 @@ package org.evenbeam.logbook.certificates;
 import org.evenbeam.logbook.LogbookException;
 import org.evenbeam.logbook.run.RunState;
 
-/** A certificate that cannot be issued or opened. */
+/** A certificate that cannot be issued. */
 public final class CertificateRefused extends LogbookException {
   private static final long serialVersionUID = 1L;
 
@@ -17,9 +17,5 @@ public final class CertificateRefused extends LogbookException {
 
   static CertificateRefused alreadyIssued(long run, String number) {
     return new CertificateRefused("certificate-already-issued", run, number);
-  }
-
-  static CertificateRefused notYetPrinted(String number) {
-    return new CertificateRefused("certificate-not-yet-printed", number);
   }
 }

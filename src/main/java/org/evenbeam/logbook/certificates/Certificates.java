@@ -1,7 +1,11 @@
 package org.evenbeam.logbook.certificates;
 
+import java.time.Clock;
+import java.time.Instant;
+import java.time.temporal.ChronoUnit;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import org.evenbeam.logbook.Desk;
 import org.evenbeam.logbook.LastingJson;
 import org.evenbeam.logbook.NotFound;
@@ -36,18 +40,22 @@ public final class Certificates {
   private final Sources sources;
   private final CertificatePress press;
   private final String program;
+  private final Clock clock;
 
   /**
    * Works on the given store and press.
    *
    * @param program the program's version, named in each record
+   * @param clock by which printing is dated
    */
   public Certificates(
       Desk desk,
       CertificateRecords certificates,
       Sources sources,
       CertificatePress press,
-      String program) {
+      String program,
+      Clock clock) {
+    this.clock = clock;
     this.desk = desk;
     this.certificates = certificates;
     this.sources = sources;
@@ -62,27 +70,40 @@ public final class Certificates {
    * @throws CertificateRefused when the run is not approved or has its certificate already
    */
   public String issue(Session session, long run) {
-    CertificateRecord record =
-        desk.change(
-            session,
-            UseCase.ISSUE_CERTIFICATE,
-            transaction -> {
-              CertificateRecord made = record(transaction, session, run);
-              certificates.add(transaction, made);
-              return made;
-            });
-    print(session, record);
+    CertificateRecord record = issueRecord(session, run);
+    print(record);
     return record.number();
   }
 
-  /** Prints what was recorded and not yet printed, as after a crash; returns the numbers. */
-  public List<String> printPending(Session session) {
-    List<String> pending =
-        desk.read(session, UseCase.READ_CERTIFICATES, certificates::withoutDocument);
-    for (String number : pending) {
-      print(session, record(session, number));
-    }
-    return pending;
+  /**
+   * Issues the record of an approved run's certificate; its document is printed when it is first
+   * asked for, or by {@link #printNext()}.
+   *
+   * @throws CertificateRefused when the run is not approved or has its certificate already
+   */
+  public CertificateRecord issueRecord(Session session, long run) {
+    return desk.change(
+        session,
+        UseCase.ISSUE_CERTIFICATE,
+        transaction -> {
+          CertificateRecord made = record(transaction, session, run);
+          certificates.add(transaction, made);
+          return made;
+        });
+  }
+
+  /**
+   * Prints the oldest certificate that was recorded and not printed, as after a crash; its number.
+   */
+  public Optional<String> printNext() {
+    Optional<CertificateRecord> next =
+        desk.readByItself(
+            transaction ->
+                certificates.withoutDocument(transaction).stream()
+                    .findFirst()
+                    .flatMap(number -> certificates.find(transaction, number)));
+    next.ifPresent(this::print);
+    return next.map(CertificateRecord::number);
   }
 
   /** All certificates, newest first, at most {@code most}. */
@@ -105,26 +126,34 @@ public final class Certificates {
   }
 
   /**
-   * The bytes of a certificate's document as they were issued.
+   * The bytes of a certificate's document as they were issued; printed now where that was still to
+   * come.
    *
-   * @throws CertificateRefused when it is not printed yet
+   * @throws NotFound when there is no such certificate
    */
   public byte[] document(Session session, String number) {
     return desk.read(
             session,
             UseCase.READ_CERTIFICATES,
             transaction -> certificates.document(transaction, number))
-        .orElseThrow(() -> CertificateRefused.notYetPrinted(number));
+        .orElseGet(() -> print(record(session, number)));
   }
 
-  private void print(Session session, CertificateRecord record) {
+  /** One at a time, so that nobody prints what another is printing. */
+  private synchronized byte[] print(CertificateRecord record) {
+    return desk.readByItself(transaction -> certificates.document(transaction, record.number()))
+        .orElseGet(() -> printed(record));
+  }
+
+  private byte[] printed(CertificateRecord record) {
     byte[] document = press.print(record);
-    desk.change(
-        session,
+    Instant at = clock.instant().truncatedTo(ChronoUnit.MICROS);
+    return desk.changeByItself(
+        at,
         UseCase.KEEP_CERTIFICATE_DOCUMENT,
         transaction -> {
-          certificates.addDocument(transaction, record.number(), document, session.now());
-          return document.length;
+          certificates.addDocument(transaction, record.number(), document, at);
+          return document;
         });
   }
 
@@ -169,6 +198,7 @@ public final class Certificates {
         sheet,
         sources.runs().findings(transaction, submission),
         sources.runs().signatures(transaction, run).stream()
+            .filter(signature -> signature.contentSha256().equals(sheet.contentSha256()))
             .filter(signature -> signature.meaning() != Signature.Meaning.RETURNED)
             .map(signature -> signed(transaction, signature))
             .toList(),
