@@ -1,5 +1,6 @@
 package org.evenbeam.ui.runsheet;
 
+import javafx.application.Platform;
 import javafx.beans.binding.Bindings;
 import javafx.beans.binding.StringBinding;
 import javafx.collections.ListChangeListener;
@@ -61,7 +62,12 @@ final class ReadingsCard extends VBox {
     model
         .lines()
         .addListener(
-            (ListChangeListener<ReadingLine>) change -> list.scrollTo(model.lines().size() - 1));
+            (ListChangeListener<ReadingLine>) change -> Platform.runLater(this::showNewest));
+  }
+
+  /** After the new line has been laid out, or it would be shown in part. */
+  private void showNewest() {
+    list.scrollTo(model.lines().size() - 1);
   }
 
   private String which(RunSheetViewModel sheet) {

@@ -1,11 +1,8 @@
 package org.evenbeam.ui.runsheet;
 
 import javafx.geometry.Pos;
-import javafx.geometry.VPos;
 import javafx.scene.control.Label;
-import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
-import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 import org.evenbeam.ui.common.Panes;
 import org.evenbeam.ui.common.ScreenTexts;
@@ -29,17 +26,14 @@ final class SheetHeader extends VBox {
     this.texts = texts;
     this.words = new SheetWords(texts);
     tag.setMinWidth(USE_PREF_SIZE);
-    for (Label line : java.util.List.of(run, standard)) {
+    for (Label line : java.util.List.of(instrument, run, standard)) {
       line.setWrapText(true);
       line.setMinHeight(USE_PREF_SIZE);
     }
     pastDue.setMinWidth(USE_PREF_SIZE);
-    FlowPane what = new FlowPane(16, 0, tag, instrument);
-    what.setRowValignment(VPos.CENTER);
-    HBox.setHgrow(what, Priority.ALWAYS);
-    HBox first = new HBox(16, what, status);
+    HBox first = new HBox(16, tag, Panes.spring(), status);
     first.setAlignment(Pos.CENTER_LEFT);
-    getChildren().addAll(first, run, standard);
+    getChildren().addAll(first, instrument, run, standard);
     model.state().addListener((state, before, now) -> show());
     model.selected().addListener((point, before, now) -> show());
   }
