@@ -2,6 +2,7 @@ package org.evenbeam.cli;
 
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
+import org.evenbeam.cli.readings.ReadingsNeededCommand;
 import org.evenbeam.logbook.files.CheckPointFiles;
 import org.evenbeam.wording.Figures;
 import org.evenbeam.wording.Problems;
@@ -70,6 +71,7 @@ public final class EvenbeamCommand implements Callable<Integer> {
     CommandLine line = new CommandLine(new EvenbeamCommand(parts.window()));
     line.addSubcommand(new EvaluateCommand(parts.files(), sentences));
     line.addSubcommand(new DemoCommand(parts.demonstration(), words, sentences));
+    line.addSubcommand(ReadingsNeededCommand.of(words));
     line.setExecutionExceptionHandler(new Failure(new Problems(words)));
     return line;
   }
