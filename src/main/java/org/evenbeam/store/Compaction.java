@@ -14,8 +14,7 @@ import org.slf4j.LoggerFactory;
 
 /**
  * Rewrites a closed database without the space that older versions of its pages took. Each change
- * writes some 40 kB of pages, of which nearly all are out of date a moment later; the database
- * reuses such space slowly, and not at all while changes follow fast, as in an import.
+ * writes some 40 kB of pages at the file's end, of which nearly all are out of date a moment later.
  *
  * <p>A copy is rewritten, since H2 removes the old file before the new one is on the disk. The copy
  * is on the disk and has been opened and compared before it takes the place of the old file, by one
@@ -48,14 +47,21 @@ final class Compaction {
     Path rewritten = folder.newDatabase();
     try {
       Files.copy(folder.database(), rewritten, StandardCopyOption.REPLACE_EXISTING);
-      MVStoreTool.compact(rewritten.toString(), false);
+      rewrite(rewritten);
       if (!head.equals(headOf(rewritten, passwords))) {
         throw new IOException("the rewritten database has another head of its trail");
       }
-      force(rewritten);
       Files.move(rewritten, folder.database(), StandardCopyOption.ATOMIC_MOVE);
     } catch (IOException | SQLException | MVStoreException failed) {
       LOG.warn("The database was not compacted and stays as it was: {}", failed.toString());
+    }
+  }
+
+  /** Rewrites a closed database that nothing depends on yet, and writes it through to the disk. */
+  static void rewrite(Path database) throws IOException {
+    MVStoreTool.compact(database.toString(), false);
+    try (FileChannel channel = FileChannel.open(database, StandardOpenOption.WRITE)) {
+      channel.force(true);
     }
   }
 
@@ -63,12 +69,6 @@ final class Compaction {
     String url = "jdbc:h2:" + LogbookFolder.withoutEnding(database) + ";IFEXISTS=TRUE";
     try (OwnersConnection owner = OwnersConnection.open(url, passwords)) {
       return owner.head();
-    }
-  }
-
-  private static void force(Path file) throws IOException {
-    try (FileChannel channel = FileChannel.open(file, StandardOpenOption.WRITE)) {
-      channel.force(true);
     }
   }
 }

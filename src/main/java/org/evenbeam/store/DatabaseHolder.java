@@ -1,8 +1,9 @@
 package org.evenbeam.store;
 
+import java.io.IOException;
 import java.sql.SQLException;
 import java.util.Optional;
-import java.util.function.Supplier;
+import org.evenbeam.logbook.StoreFailed;
 import org.evenbeam.store.rows.Failures;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
@@ -14,7 +15,7 @@ import org.slf4j.LoggerFactory;
 final class DatabaseHolder {
   private static final Logger LOG = LoggerFactory.getLogger(DatabaseHolder.class);
 
-  private final Supplier<Database> again;
+  private final Reopening again;
   private final Failures failures;
   private Database database;
   private boolean doubtful;
@@ -26,7 +27,7 @@ final class DatabaseHolder {
    * @param database open
    * @param again opens the same again
    */
-  DatabaseHolder(Database database, Supplier<Database> again, Failures failures) {
+  DatabaseHolder(Database database, Reopening again, Failures failures) {
     this.database = database;
     this.again = again;
     this.failures = failures;
@@ -44,7 +45,7 @@ final class DatabaseHolder {
     }
     if (doubtful && !database.isAlive()) {
       abandon();
-      database = again.get();
+      database = again.open();
     }
     doubtful = false;
     return database;
@@ -53,6 +54,23 @@ final class DatabaseHolder {
   /** Says that something failed, so that the database is asked whether it still answers. */
   synchronized void doubt() {
     doubtful = true;
+  }
+
+  /**
+   * Whether the file of a database that cannot be opened ends with that entry all the same, on the
+   * disk.
+   *
+   * @param failed what is told to the person otherwise, gets what stood in the way of looking
+   */
+  synchronized boolean isKept(String head, StoreFailed failed) {
+    doubtful = true;
+    abandon();
+    try {
+      return again.isKept(head);
+    } catch (SQLException | IOException unseen) {
+      failed.addSuppressed(unseen);
+      return false;
+    }
   }
 
   /** Writes what was committed through to the disk. */

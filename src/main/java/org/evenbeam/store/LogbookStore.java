@@ -9,7 +9,6 @@ import java.sql.SQLException;
 import java.util.UUID;
 import java.util.function.BooleanSupplier;
 import java.util.function.Consumer;
-import java.util.function.Supplier;
 import org.evenbeam.logbook.Transactions;
 import org.evenbeam.logbook.certificates.CertificateRecords;
 import org.evenbeam.logbook.history.TrailRecords;
@@ -28,6 +27,7 @@ import org.evenbeam.store.tables.PlanTable;
 import org.evenbeam.store.tables.RunTable;
 import org.evenbeam.store.tables.StandardTable;
 import org.evenbeam.store.tables.TrailTable;
+import org.h2.mvstore.MVStoreException;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 
@@ -94,8 +94,8 @@ public final class LogbookStore implements AutoCloseable {
     Failures failures = new Failures(folder.database());
     Passwords passwords = Passwords.read(folder.passwords());
     String url = url(fileSystem, folder.database());
-    Supplier<Database> opener = () -> Database.open(url, passwords, failures);
-    DatabaseHolder holder = new DatabaseHolder(opener.get(), opener, failures);
+    Reopening again = new Reopening(url, folder.database(), passwords, failures);
+    DatabaseHolder holder = new DatabaseHolder(again.open(), again, failures);
     return new LogbookStore(
         new StoreTransactions(holder, onScreen, failures),
         lock,
@@ -112,7 +112,7 @@ public final class LogbookStore implements AutoCloseable {
     DatabaseHolder holder =
         new DatabaseHolder(
             Database.create(url, passwords, failures),
-            () -> Database.open(url, passwords, failures),
+            new Reopening(url, nowhere, passwords, failures),
             failures);
     return new LogbookStore(
         new StoreTransactions(holder, onScreenThread, failures), () -> {}, head -> {}, failures);
@@ -195,7 +195,10 @@ public final class LogbookStore implements AutoCloseable {
     }
   }
 
-  /** Makes the database under another name, so that a half-made one is never taken for one. */
+  /**
+   * Makes the database under another name, so that a half-made one is never taken for one, and
+   * without the states that it went through, so that a cut file does not fall back to one of them.
+   */
   private static void create(LogbookFolder folder, String fileSystem) {
     Failures failures = new Failures(folder.database());
     try {
@@ -205,8 +208,9 @@ public final class LogbookStore implements AutoCloseable {
       Files.deleteIfExists(folder.newDatabase());
       Passwords passwords = Passwords.read(folder.passwords());
       Database.create(url(fileSystem, folder.newDatabase()), passwords, failures).close();
+      Compaction.rewrite(folder.newDatabase());
       Files.move(folder.newDatabase(), folder.database(), StandardCopyOption.ATOMIC_MOVE);
-    } catch (IOException | SQLException failed) {
+    } catch (IOException | SQLException | MVStoreException failed) {
       throw failures.of(failed);
     }
   }

@@ -166,24 +166,26 @@ final class StoreTransactions implements Transactions {
      * change that is kept is acknowledged, so that nobody makes it twice.
      */
     private void requireKept(StoreFailed failed) {
-      if (sealed == null) {
+      if (sealed == null || !isKept(failed)) {
         throw failed;
       }
+    }
+
+    private boolean isKept(StoreFailed failed) {
       try {
         TrailHead head =
             transact(
                 Purpose.READ,
                 TransactionIsolationLevel.READ_COMMITTED,
                 transaction -> TrailHead.read(OpenTransaction.reading(transaction)));
-        if (!head.hash().equals(sealed.hash())) {
-          throw failed;
+        boolean kept = head.hash().equals(sealed.hash());
+        if (kept) {
+          sync();
         }
-        sync();
+        return kept;
       } catch (StoreFailed again) {
-        if (again != failed) {
-          failed.addSuppressed(again);
-        }
-        throw failed;
+        failed.addSuppressed(again);
+        return holder.isKept(sealed.hash(), failed);
       }
     }
   }

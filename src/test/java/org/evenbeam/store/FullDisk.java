@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.nio.ByteBuffer;
 import java.nio.channels.FileChannel;
 import java.nio.channels.FileLock;
+import java.util.concurrent.atomic.AtomicInteger;
 import java.util.concurrent.atomic.AtomicLong;
 import org.h2.store.fs.FileBase;
 import org.h2.store.fs.FilePath;
@@ -14,6 +15,8 @@ public final class FullDisk extends FilePathWrapper {
   static final String SCHEME = "fulldisk";
 
   private static final AtomicLong LEFT = new AtomicLong(Long.MAX_VALUE);
+
+  private static final AtomicInteger FAILING_FORCES = new AtomicInteger();
 
   /** Made by H2 too, through a prototype. */
   public FullDisk() {}
@@ -28,6 +31,12 @@ public final class FullDisk extends FilePathWrapper {
 
   static void free() {
     LEFT.set(Long.MAX_VALUE);
+    FAILING_FORCES.set(0);
+  }
+
+  /** The next writing through fails, as where space is given out late; what was written stays. */
+  static void failOneForce() {
+    FAILING_FORCES.set(1);
   }
 
   @Override
@@ -115,6 +124,9 @@ public final class FullDisk extends FilePathWrapper {
 
     @Override
     public void force(boolean metadata) throws IOException {
+      if (FAILING_FORCES.getAndUpdate(left -> Math.max(0, left - 1)) > 0) {
+        throw new IOException("No space left on device");
+      }
       file.force(metadata);
     }
 

@@ -103,7 +103,8 @@ class OpeningTest {
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"empty", "ten bytes", "header overwritten", "all overwritten", "half"})
+  @ValueSource(
+      strings = {"empty", "ten bytes", "header overwritten", "all overwritten", "a quarter left"})
   void damagedFileIsRefused(String damage) throws IOException {
     makeLogbook();
     byte[] bytes = Files.readAllBytes(file(DATABASE));
@@ -157,7 +158,7 @@ class OpeningTest {
     return switch (damage) {
       case "empty" -> new byte[0];
       case "ten bytes" -> Arrays.copyOf(bytes, 10);
-      case "half" -> Arrays.copyOf(bytes, bytes.length / 2);
+      case "a quarter left" -> Arrays.copyOf(bytes, bytes.length / 4);
       case "header overwritten" -> overwritten(bytes, 8192);
       default -> overwritten(bytes, bytes.length);
     };
@@ -194,7 +195,7 @@ class OpeningTest {
         .isInstanceOfSatisfying(
             StoreFailed.class,
             failed -> {
-              assertThat(failed.reason()).isEqualTo(reason);
+              assertThat(failed.reason()).as(failed.getMessage()).isEqualTo(reason);
               assertThat(failed.arguments().get(1)).isEqualTo(named.toString());
               caught[0] = failed;
             });
