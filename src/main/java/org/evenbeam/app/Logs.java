@@ -13,12 +13,18 @@ import org.evenbeam.logbook.StoreFailed;
 final class Logs {
   private static final int LARGEST_BYTES = 1_000_000;
   private static final int KEPT = 5;
+  private static final Logger TOOLKIT = Logger.getLogger("javafx");
+  private static final String ON_THE_CLASS_PATH = "Unsupported JavaFX configuration";
 
   private Logs() {}
 
-  /** From now on only warnings and errors are kept; libraries tell much more than anyone reads. */
+  /**
+   * From now on only warnings and errors are kept; libraries tell much more than anyone reads. That
+   * the toolkit lies on the class path is meant so, and no news to a person at the bench.
+   */
   static void onlyWarnings() {
     Logger.getLogger("").setLevel(Level.WARNING);
+    TOOLKIT.setFilter(message -> !message.getMessage().startsWith(ON_THE_CLASS_PATH));
   }
 
   /**

@@ -132,7 +132,7 @@ class EvaluateCommandTest {
       textBlock =
           """
           a,20,,,0.0001,0.0005,,,, | a,twenty            | R.csv, line 2, column 2 (reading)
-          a,20,,,0.0001,0.0005,,,, | a,"1,234"           | decimals with the other sign
+          a,20,,,0.0001,0.0005,,,, | a,"1,234"           | decimal sign is not the one in use
           a,20,,,0.0001,0.0005,,,, | a,1,234             | R.csv, line 2, column 3
           a,20,,,0.0001,0.0005,,,, | a,NaN               | "NaN" was not taken as a number
           a,20,,,0.0001,0.0005,,,, | a,1e400             | outside 1e-150 to 1e150
