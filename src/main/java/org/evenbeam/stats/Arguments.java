@@ -38,6 +38,15 @@ public final class Arguments {
   }
 
   /**
+   * Refuses what is not within a closed range.
+   *
+   * @throws IllegalArgumentException if {@code value} is not in [low, high]
+   */
+  public static double within(String name, double value, double low, double high) {
+    return require(value >= low && value <= high, name, value, low + " to " + high);
+  }
+
+  /**
    * Refuses what is not a probability strictly between zero and one.
    *
    * @throws IllegalArgumentException if {@code value} is not in (0, 1)
