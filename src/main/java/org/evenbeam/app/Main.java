@@ -6,6 +6,7 @@ import java.util.Locale;
 import org.evenbeam.certificate.TemplatePress;
 import org.evenbeam.cli.EvenbeamCommand;
 import org.evenbeam.exchange.CheckPointTables;
+import org.evenbeam.exchange.WeighingTable;
 import org.evenbeam.logbook.certificates.CertificatePress;
 import org.evenbeam.metrology.DecimalSign;
 import org.evenbeam.wording.Figures;
@@ -27,6 +28,7 @@ public final class Main {
     EvenbeamCommand.Parts parts =
         new EvenbeamCommand.Parts(
             new CheckPointTables(),
+            new WeighingTable(),
             (folder, fresh) ->
                 new DemonstrationLaboratory(
                     orElse(folder, folders.demonstration()), fresh, press()),

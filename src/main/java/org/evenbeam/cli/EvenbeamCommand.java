@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import org.evenbeam.cli.readings.ReadingsNeededCommand;
 import org.evenbeam.logbook.files.CheckPointFiles;
+import org.evenbeam.logbook.files.WeighingFiles;
 import org.evenbeam.wording.Figures;
 import org.evenbeam.wording.Problems;
 import org.evenbeam.wording.Sentences;
@@ -27,12 +28,16 @@ public final class EvenbeamCommand implements Callable<Integer> {
    * What the commands need from outside.
    *
    * @param files reads check points and readings
+   * @param weighings reads weighings of water
    * @param demonstration makes the demonstration laboratory
    * @param window opens the window on a laboratory's folder, or on the usual one for null; returns
    *     the exit status
    */
   public record Parts(
-      CheckPointFiles files, DemonstrationFactory demonstration, WindowOpener window) {}
+      CheckPointFiles files,
+      WeighingFiles weighings,
+      DemonstrationFactory demonstration,
+      WindowOpener window) {}
 
   /** Makes the demonstration laboratory. */
   @FunctionalInterface
@@ -72,6 +77,7 @@ public final class EvenbeamCommand implements Callable<Integer> {
     line.addSubcommand(new EvaluateCommand(parts.files(), sentences));
     line.addSubcommand(new DemoCommand(parts.demonstration(), words, sentences));
     line.addSubcommand(ReadingsNeededCommand.of(words));
+    line.addSubcommand(new VolumesCommand(parts.weighings(), words, figures));
     line.setExecutionExceptionHandler(new Failure(new Problems(words)));
     return line;
   }

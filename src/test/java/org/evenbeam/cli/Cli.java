@@ -4,6 +4,7 @@ import java.io.PrintWriter;
 import java.io.StringWriter;
 import java.util.Locale;
 import org.evenbeam.exchange.CheckPointTables;
+import org.evenbeam.exchange.WeighingTable;
 import org.evenbeam.metrology.DecimalSign;
 import org.evenbeam.wording.Figures;
 import org.evenbeam.wording.Words;
@@ -17,6 +18,7 @@ record Cli(int exit, String out, String err) {
         EvenbeamCommand.of(
             new EvenbeamCommand.Parts(
                 new CheckPointTables(),
+                new WeighingTable(),
                 (folder, fresh) -> {
                   throw new AssertionError("no demonstration here");
                 },
