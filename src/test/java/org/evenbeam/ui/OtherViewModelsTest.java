@@ -79,6 +79,7 @@ class OtherViewModelsTest {
     Session technician = laboratory.technician();
     BenchViewModel bench = bench(technician);
     bench.choose(instrument(bench, "PH-02"));
+    bench.record(InstrumentEvent.Kind.ADJUSTMENT, "before the run", () -> {}, refusals::add);
     bench.start(bench.starts().get().plans().get(0), RunKind.AS_FOUND);
     assertThat(opened).hasSize(1);
     bench.choose(instrument(bench, "PH-02"));

@@ -129,6 +129,22 @@ class RunSheetViewModelTest {
   }
 
   @Test
+  void aSaveThatWaitedDoesNotBringBackWhatWasEntered() {
+    Held held = new Held();
+    RunSheetViewModel slow = sheet(technician, held);
+    slow.load();
+    held.releaseAll();
+    slow.typed().set("5");
+    slow.typed().set("50.0001");
+    slow.enter();
+    held.releaseAll();
+    RunSheetViewModel reopened = sheet(technician, Background.direct());
+    reopened.load();
+    assertThat(reopened.lines()).hasSize(1);
+    assertThat(reopened.typed().get()).isEmpty();
+  }
+
+  @Test
   void whatIsTypedStaysWithItsCheckPoint() {
     sheet.typed().set("50.00");
     sheet.select("100 g");
