@@ -3,8 +3,8 @@ package org.evenbeam.metrology;
 /**
  * The density of moist air by CIPM-2007 in its full form, {@code p Ma / (Z R T) * (1 - xv (1 - Mv /
  * Ma))}: A. Picard, R. S. Davis, M. Gläser, K. Fujii, Metrologia 45 (2008) 149-155,
- * doi:10.1088/0026-1394/45/2/004, equation 1 and annex A. The short form printed there has rounded
- * constants and differs by up to 2e-6.
+ * doi:10.1088/0026-1394/45/2/004, equation 1 and its appendix. The short form printed there has
+ * rounded constants and differs by up to 2e-6.
  */
 final class MoistAir {
   /** In J/(mol K), CODATA 2006, as the formula was published. */
@@ -33,23 +33,23 @@ final class MoistAir {
     return dry * (1 - vapourFraction() * (1 - WATER_MOLAR_MASS / dryMolarMass));
   }
 
-  /** Saturation vapour pressure, in Pa (annex A1.1). */
+  /** Saturation vapour pressure, in Pa. */
   double saturationPressure() {
     double square = 1.2378847e-5 * kelvin * kelvin;
     return Math.exp(square - 1.9121316e-2 * kelvin + 33.93711047 - 6.3431645e3 / kelvin);
   }
 
-  /** Enhancement factor (annex A1.1). */
+  /** Enhancement factor. */
   double enhancementFactor() {
     return 1.00062 + 3.14e-8 * pascals + 5.6e-7 * celsius * celsius;
   }
 
-  /** Mole fraction of water vapour (annex A1.1). */
+  /** Mole fraction of water vapour. */
   double vapourFraction() {
     return relativeHumidity * enhancementFactor() * saturationPressure() / pascals;
   }
 
-  /** Compressibility factor (annex A1.2). */
+  /** Compressibility factor. */
   double compressibilityFactor() {
     double t = celsius;
     double xv = vapourFraction();

@@ -34,8 +34,8 @@ public enum WaterDensity {
   },
   /**
    * Air-free water, 5 °C to 40 °C, as ISO/TR 20461 uses it: F. E. Jones, G. L. Harris, Journal of
-   * Research of NIST 97 (1992) 335-340, doi:10.6028/jres.097.013. Up to 4e-6 below {@link #TANAKA}
-   * from 15 °C to 30 °C, since it rests on older measurements.
+   * Research of NIST 97 (1992) 335-340, doi:10.6028/jres.097.013. At each temperature up to 4.1e-6
+   * below {@link #TANAKA}, since it rests on older measurements.
    */
   JONES_HARRIS(5) {
     @Override

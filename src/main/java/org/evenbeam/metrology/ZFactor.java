@@ -22,7 +22,8 @@ public record ZFactor(WaterDensity water, AirDensity air, double weightsDensity)
 
   /**
    * The formulas of ISO/TR 20461. At 50 % humidity and 101.3 kPa they give each of the 31 values of
-   * the table in ISO 8655-6:2002; the other set differs by up to 4.1e-6, which turns two of them.
+   * the table in ISO 8655-6:2002 (from memory); the other set differs by up to 4.1e-6, which turns
+   * two of them.
    */
   public static final ZFactor ISO_TR_20461 =
       new ZFactor(WaterDensity.JONES_HARRIS, AirDensity.ISO_TR_20461, CONVENTIONAL_WEIGHTS);

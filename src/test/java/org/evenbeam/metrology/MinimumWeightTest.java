@@ -14,7 +14,7 @@ class MinimumWeightTest {
     "0.00008, 0.0001, 0.16, false",
     "0.00003, 0.0001, 0.082, true",
     "0, 0.01, 8.2, true",
-    "0.0041, 0.01, 8.2, false"
+    "0.41, 1, 820, false"
   })
   void twoThousandTimesTheLargerOfBoth(double s, double d, double weight, boolean byResolution) {
     MinimumWeight minimum = MinimumWeight.of(s, d);
