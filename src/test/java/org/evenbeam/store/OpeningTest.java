@@ -104,7 +104,13 @@ class OpeningTest {
 
   @ParameterizedTest
   @ValueSource(
-      strings = {"empty", "ten bytes", "header overwritten", "all overwritten", "a quarter left"})
+      strings = {
+        "empty",
+        "ten bytes",
+        "header overwritten",
+        "all overwritten",
+        "headers alone left"
+      })
   void damagedFileIsRefused(String damage) throws IOException {
     makeLogbook();
     byte[] bytes = Files.readAllBytes(file(DATABASE));
@@ -158,7 +164,7 @@ class OpeningTest {
     return switch (damage) {
       case "empty" -> new byte[0];
       case "ten bytes" -> Arrays.copyOf(bytes, 10);
-      case "a quarter left" -> Arrays.copyOf(bytes, bytes.length / 4);
+      case "headers alone left" -> Arrays.copyOf(bytes, 8192);
       case "header overwritten" -> overwritten(bytes, 8192);
       default -> overwritten(bytes, bytes.length);
     };
