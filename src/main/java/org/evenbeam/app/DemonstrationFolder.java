@@ -10,12 +10,15 @@ import java.util.stream.Stream;
 import org.evenbeam.exchange.LaboratoryImport;
 import org.evenbeam.logbook.StoreFailed;
 import org.evenbeam.logbook.certificates.CertificatePress;
+import org.slf4j.Logger;
+import org.slf4j.LoggerFactory;
 
 /**
  * The folder of the demonstration laboratory. It is imported under another name and moved into
  * place when it is whole, so that a half import is never taken for one.
  */
 final class DemonstrationFolder {
+  private static final Logger LOG = LoggerFactory.getLogger(DemonstrationFolder.class);
   private static final String MARK = "demonstration-laboratory";
 
   private final Path folder;
@@ -35,7 +38,7 @@ final class DemonstrationFolder {
    * Imports the laboratory where there is none yet.
    *
    * @param fresh whether to put an existing one back to its start
-   * @throws StoreFailed when the folder cannot be written to, or holds something else
+   * @throws StoreFailed when the folder cannot be written to, holds something else or is in use
    */
   void prepare(boolean fresh) {
     Path beside = folder.resolveSibling(folder.getFileName() + "-import");
@@ -44,6 +47,7 @@ final class DemonstrationFolder {
         return;
       }
       requireOurs();
+      requireNotInUse();
       remove(beside);
       Files.createDirectories(beside);
       importInto(beside);
@@ -61,6 +65,21 @@ final class DemonstrationFolder {
           () ->
               DemonstrationData.read(
                   tables -> new LaboratoryImport(tables).into(laboratory.logbook())));
+    }
+  }
+
+  /** What another program works on is not put back to its start; what is damaged may well be. */
+  private void requireNotInUse() {
+    if (!Files.exists(folder.resolve(MARK))) {
+      return;
+    }
+    try {
+      OpenLaboratory.in(folder, press, () -> false).close();
+    } catch (StoreFailed failed) {
+      if (failed.reason() == StoreFailed.Reason.IN_USE) {
+        throw failed;
+      }
+      LOG.info("A demonstration laboratory that does not open is replaced", failed);
     }
   }
 

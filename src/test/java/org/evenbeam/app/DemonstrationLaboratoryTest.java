@@ -138,6 +138,20 @@ class DemonstrationLaboratoryTest {
   }
 
   @Test
+  void whatIsInUseIsNotPutBackToItsStart() {
+    try (OpenLaboratory inUse = OpenLaboratory.in(folder, PRESS, () -> false)) {
+      DemonstrationLaboratory again = new DemonstrationLaboratory(folder, true, PRESS);
+
+      assertThatThrownBy(again::writeCertificates)
+          .isInstanceOfSatisfying(
+              StoreFailed.class,
+              failed -> assertThat(failed.reason()).isEqualTo(StoreFailed.Reason.IN_USE));
+      assertThat(auditor(inUse.logbook()).person().name()).isEqualTo("Adela Quistorp");
+    }
+    assertThat(written.get(0).file()).exists();
+  }
+
+  @Test
   void aFolderThatHoldsSomethingElseIsLeftAlone() throws IOException {
     Path other = Files.createDirectory(parent.resolve("other"));
     Path mine = Files.writeString(other.resolve("mine.txt"), "mine");
