@@ -6,7 +6,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import org.evenbeam.stats.Interval;
 import org.evenbeam.verification.CheckPointFindings;
 import org.evenbeam.verification.Criteria;
 import org.evenbeam.verification.Criterion;
@@ -80,31 +79,16 @@ final class CriteriaRows {
   }
 
   private String bias(CheckPointFindings found, String unit) {
-    return figures.withUnit(figures.signedToPlaces(found.bias(), biasPlaces(found)), unit);
+    return figures.withUnit(figures.signedToPlaces(found.bias(), figures.biasPlaces(found)), unit);
   }
 
   private String biasInterval(CheckPointFindings found, String unit) {
-    int places = biasPlaces(found);
-    return found.biasFinding().interval().map(interval -> ends(interval, places, unit)).orElse("");
-  }
-
-  private String ends(Interval interval, int places, String unit) {
-    return figures.signedToPlaces(interval.low(), places)
-        + " … "
-        + figures.withUnit(figures.signedToPlaces(interval.high(), places), unit);
-  }
-
-  private static int decimalsOf(CheckPointFindings found) {
-    return found.question().resolution().map(d -> Math.max(0, d.scale())).orElse(0);
-  }
-
-  private int biasPlaces(CheckPointFindings found) {
+    int places = figures.biasPlaces(found);
     return found
         .biasFinding()
-        .uncertainty()
-        .filter(u -> u.standardUncertainty() > 0)
-        .map(u -> figures.placesBeside(u.standardUncertainty()))
-        .orElse(decimalsOf(found));
+        .interval()
+        .map(interval -> figures.signedInterval(interval, places, unit))
+        .orElse("");
   }
 
   private String spread(CheckPointFindings found, String unit) {

@@ -5,7 +5,6 @@ import static org.evenbeam.wording.Words.Bundle.CERTIFICATE;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
-import org.evenbeam.stats.Interval;
 import org.evenbeam.verification.CheckPointFindings;
 import org.evenbeam.wording.Figures;
 import org.evenbeam.wording.Words;
@@ -43,7 +42,7 @@ final class StatisticsRows {
   }
 
   private void moments(CheckPointFindings found, String unit, List<Entry> entries) {
-    int places = places(found);
+    int places = figures.biasPlaces(found);
     add(entries, "stat.n", Integer.toString(found.n()));
     add(entries, "stat.mean", figures.withUnit(figures.toPlaces(found.mean(), places), unit));
     found
@@ -82,7 +81,8 @@ final class StatisticsRows {
               add(
                   entries,
                   "stat.t-interval",
-                  interval(test.interval(), figures.placesBeside(test.standardError()), unit),
+                  figures.signedInterval(
+                      test.interval(), figures.placesBeside(test.standardError()), unit),
                   figures.percent(1 - found.question().criteria().alpha()));
             });
   }
@@ -112,20 +112,6 @@ final class StatisticsRows {
                         + " … "
                         + figures.withUnit(figures.uncertainty(bounds.interval().high()), unit),
                     figures.percent(1 - bounds.alpha())));
-  }
-
-  private String interval(Interval interval, int places, String unit) {
-    return figures.signedToPlaces(interval.low(), places)
-        + " … "
-        + figures.withUnit(figures.signedToPlaces(interval.high(), places), unit);
-  }
-
-  private int places(CheckPointFindings found) {
-    return found
-        .biasFinding()
-        .uncertainty()
-        .map(u -> figures.placesBeside(u.standardUncertainty()))
-        .orElse(found.question().resolution().map(d -> Math.max(0, d.scale())).orElse(0));
   }
 
   private void add(List<Entry> entries, String key, String value, String... arguments) {

@@ -10,6 +10,7 @@ import java.util.Optional;
 import java.util.OptionalInt;
 import org.evenbeam.logbook.files.BadInput;
 import org.evenbeam.logbook.files.CheckPointFiles;
+import org.evenbeam.stats.Arguments;
 import org.evenbeam.verification.CheckPointQuestion;
 import org.evenbeam.verification.Criteria;
 import org.evenbeam.verification.DecisionRule;
@@ -42,8 +43,6 @@ public final class CheckPointTables implements CheckPointFiles {
           PRECISION_RULE);
   private static final List<String> READING_HEADER = List.of(CHECK_POINT, READING);
   private static final double USUAL_ALPHA = 0.05;
-  private static final double SMALLEST_ALPHA = 1e-12;
-  private static final double LARGEST_ALPHA = 0.5;
   private static final double FEWEST_DEGREES = 0.5;
   private static final Map<String, DecisionRule> RULES =
       Map.of(
@@ -110,7 +109,7 @@ public final class CheckPointTables implements CheckPointFiles {
   private static Criteria criteria(TableRow row) {
     Optional<BigDecimal> bias = row.positive(MAX_BIAS);
     double alpha = row.number(ALPHA).map(BigDecimal::doubleValue).orElse(USUAL_ALPHA);
-    if (!(alpha >= SMALLEST_ALPHA && alpha <= LARGEST_ALPHA)) {
+    if (!(alpha >= Arguments.SMALLEST_ALPHA && alpha <= Arguments.LARGEST_ALPHA)) {
       throw BadInput.range(row.place(ALPHA), row.text(ALPHA), "1e-12 … 0.5");
     }
     return new Criteria(

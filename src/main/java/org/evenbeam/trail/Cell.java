@@ -1,7 +1,6 @@
 package org.evenbeam.trail;
 
 import java.math.BigDecimal;
-import java.nio.charset.StandardCharsets;
 import java.time.Instant;
 import java.time.LocalDate;
 import java.util.Optional;
@@ -62,11 +61,6 @@ public record Cell(Object value) {
   /** A bytes column, by the SHA-256 of its content. */
   public static Cell of(byte[] bytes) {
     return new Cell("sha256:" + Sha256.hex(bytes));
-  }
-
-  /** A large text kept as bytes, by the SHA-256 of its UTF-8 form. */
-  public static Cell ofLargeText(String text) {
-    return of(text.getBytes(StandardCharsets.UTF_8));
   }
 
   /** The column's value as text, empty for nothing. */

@@ -2,6 +2,7 @@ package org.evenbeam.verification;
 
 import java.math.BigDecimal;
 import java.util.Optional;
+import org.evenbeam.stats.Arguments;
 
 /**
  * The limits of one check point in the unit of its readings, and the rules that hold readings
@@ -29,9 +30,7 @@ public record Criteria(
     positive("biasBelow", biasBelow);
     positive("biasAbove", biasAbove);
     positive("maximumStandardDeviation", maximumStandardDeviation);
-    if (!(alpha >= 1e-12 && alpha <= 0.5)) {
-      throw new IllegalArgumentException("alpha is " + alpha + ", allowed: 1e-12 to 0.5");
-    }
+    Arguments.significance(alpha);
   }
 
   private static void positive(String name, Optional<BigDecimal> limit) {

@@ -16,9 +16,6 @@ public sealed interface Note {
   /** The criterion has no limit and is not asked. */
   record NotAsked(Criterion criterion) implements Note {}
 
-  /** There are no readings that count. */
-  record NoReadings() implements Note {}
-
   /** One reading has no standard deviation, so no test of it exists. */
   record OneReading() implements Note {}
 

@@ -4,6 +4,8 @@ import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
 import org.evenbeam.metrology.DecimalSign;
+import org.evenbeam.stats.Interval;
+import org.evenbeam.verification.CheckPointFindings;
 
 /**
  * How figures are written: the laboratory's decimal sign, a true minus sign, no grouping. An
@@ -73,6 +75,26 @@ public final class Figures {
         BigDecimal.valueOf(uncertainty)
             .round(new MathContext(UNCERTAINTY_DIGITS, RoundingMode.HALF_EVEN));
     return Math.max(0, UNCERTAINTY_DIGITS - (two.precision() - two.scale()));
+  }
+
+  /**
+   * The decimal places at which a bias and its interval are written: beside its uncertainty, else
+   * as read.
+   */
+  public int biasPlaces(CheckPointFindings found) {
+    return found
+        .biasFinding()
+        .uncertainty()
+        .filter(u -> u.standardUncertainty() > 0)
+        .map(u -> placesBeside(u.standardUncertainty()))
+        .orElseGet(() -> found.question().resolution().map(d -> Math.max(0, d.scale())).orElse(0));
+  }
+
+  /** The two ends of an interval about zero, with their signs. */
+  public String signedInterval(Interval interval, int places, String unit) {
+    return signedToPlaces(interval.low(), places)
+        + " … "
+        + withUnit(signedToPlaces(interval.high(), places), unit);
   }
 
   /** A probability: two significant digits, never 0 where it is only small. */

@@ -114,8 +114,7 @@ public final class Sentences {
       return Optional.of(words.text(FINDING, "bias.cannot"));
     }
     Shown shown = finding.shown().orElseThrow();
-    double u = finding.uncertainty().orElseThrow().standardUncertainty();
-    int places = u > 0 ? figures.placesBeside(u) : placesOf(found);
+    int places = figures.biasPlaces(found);
     Interval interval = finding.interval().orElseThrow();
     String said =
         words.text(
@@ -182,10 +181,6 @@ public final class Sentences {
     }
     String sentence = said.substring(0, 1).toUpperCase(words.locale()) + said.substring(1);
     return words.text(FINDING, "decided", sentence, rule(rule), verdict(outcome));
-  }
-
-  private static int placesOf(CheckPointFindings found) {
-    return found.question().resolution().map(d -> Math.max(0, d.scale())).orElse(0);
   }
 
   private String amount(BigDecimal value, String unit) {

@@ -192,13 +192,14 @@ public final class Certificates {
             .find(transaction)
             .orElseThrow(() -> new NotFound(NotFound.Thing.LABORATORY, ""));
     RunSheet sheet = sources.sheets().read(transaction, run);
+    String content = sheet.contentSha256();
     long submission = approval.answers().orElseThrow().eventId();
     return new CertificateData(
         laboratory,
         sheet,
         sources.runs().findings(transaction, submission),
         sources.runs().signatures(transaction, run).stream()
-            .filter(signature -> signature.contentSha256().equals(sheet.contentSha256()))
+            .filter(signature -> signature.contentSha256().equals(content))
             .filter(signature -> signature.meaning() != Signature.Meaning.RETURNED)
             .map(signature -> signed(transaction, signature))
             .toList(),

@@ -1,7 +1,6 @@
 package org.evenbeam.logbook.run;
 
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
@@ -229,7 +228,7 @@ public final class Bench {
         sheet.checkPoints().stream()
             .flatMap(point -> point.readings().stream())
             .filter(r -> r.id() == readingId)
-            .min(Comparator.comparingLong(Reading::id))
+            .findFirst()
             .orElseThrow(() -> new NotFound(NotFound.Thing.READING, Long.toString(readingId)));
     boolean counts =
         sheet.checkPoints().stream().anyMatch(point -> point.counting().contains(reading));
